@@ -1,0 +1,13 @@
+/**
+ * Blocks and the run folder: what is on disk, whole or not at all.
+ *
+ * <p><b>In</b>: {@link manyskies.result.Block}, the finished work of one task. <b>Out</b>: Parquet
+ * files under {@code blocks/} (bandpowers, one row per realisation) and {@code fields/} (sums of
+ * reconstructed modes), each with its checksum; and blocks read back.
+ *
+ * <p><b>Flow</b>: a task encodes its block to bytes; one committer writes beside the target, syncs
+ * and renames. A block exists exactly when its bandpower file stands under its final name.
+ *
+ * <p><b>Uses</b> specification, spectrum. Alone imports Parquet.
+ */
+package manyskies.result;
