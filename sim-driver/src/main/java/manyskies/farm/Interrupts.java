@@ -1,0 +1,70 @@
+package manyskies.farm;
+
+import java.lang.reflect.InvocationHandler;
+import java.lang.reflect.Proxy;
+
+/**
+ * Ctrl-C while the farm works: the first throws the switch, the second ends the program at once.
+ *
+ * <p>A shutdown hook would hear the first only, and the JVM would be going down already. The class
+ * that hears signals, sun.misc.Signal, is supported but in no standard module: javac warns of its
+ * name and allows no suppression, so it is reached by reflection.
+ */
+public final class Interrupts implements AutoCloseable {
+    private static final int ENDED_BY_CTRL_C = 130;
+
+    private final Object before;
+
+    private Interrupts(Object before) {
+        this.before = before;
+    }
+
+    /** Listens until closed. */
+    public static Interrupts throwing(StopSwitch stop) {
+        InvocationHandler onSignal =
+                (proxy, method, arguments) -> {
+                    if (method.getName().equals("handle")) {
+                        interrupted(stop);
+                        return null;
+                    }
+                    return method.invoke(stop, arguments); // equals, hashCode, toString
+                };
+        return new Interrupts(
+                handle(
+                        Proxy.newProxyInstance(
+                                Interrupts.class.getClassLoader(),
+                                new Class<?>[] {type("sun.misc.SignalHandler")},
+                                onSignal)));
+    }
+
+    private static void interrupted(StopSwitch stop) {
+        if (stop.stopped()) {
+            Runtime.getRuntime().halt(ENDED_BY_CTRL_C);
+        }
+        stop.stop();
+    }
+
+    /** Signal.handle(new Signal("INT"), handler). */
+    private static Object handle(Object handler) {
+        Class<?> signal = type("sun.misc.Signal");
+        try {
+            return signal.getMethod("handle", signal, type("sun.misc.SignalHandler"))
+                    .invoke(null, signal.getConstructor(String.class).newInstance("INT"), handler);
+        } catch (ReflectiveOperationException e) {
+            throw new IllegalStateException("this JVM does not let a program hear Ctrl-C", e);
+        }
+    }
+
+    private static Class<?> type(String name) {
+        try {
+            return Class.forName(name);
+        } catch (ClassNotFoundException e) {
+            throw new IllegalStateException("this JVM has no " + name, e);
+        }
+    }
+
+    @Override
+    public void close() {
+        handle(before);
+    }
+}
