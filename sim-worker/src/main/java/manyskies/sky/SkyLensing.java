@@ -1,0 +1,183 @@
+package manyskies.sky;
+
+import java.util.Arrays;
+import java.util.Optional;
+import manyskies.field.Modes;
+import manyskies.flat.FlatGrid;
+import manyskies.flat.MapTransform;
+import manyskies.flat.ModeDisc;
+import manyskies.flat.StokesMaps;
+import manyskies.spectrum.Spectra;
+import manyskies.spectrum.Spectrum;
+
+/**
+ * Lensing by remapping: X~(x) = X(x + d(x)), d_i = d_i phi + eps_ij d_j psi, for X = T, Q, U.
+ *
+ * <p>X is a B-spline whose coefficients are made in Fourier space by {@link BSpline#prefilter} for
+ * the displacement's rms per axis; the rotation of E, B into Q, U and the derivatives of phi are
+ * taken in the same pass, so that one sky costs five inverse transforms. Flat sky: the polarisation
+ * basis is not rotated along the deflection.
+ *
+ * <p>Holds scratch memory: one thread at a time. Results depend on the arguments alone.
+ */
+public final class SkyLensing {
+    private final MapTransform transform;
+    private final ModeDisc disc;
+    private final SplineMaps splines;
+    private final double[] filterX; // by kx
+    private final double[] filterY; // by |ky|
+    private final double[] first; // half planes
+    private final double[] second;
+    private final double[] dx; // displacement maps in pixels
+    private final double[] dy;
+
+    private SkyLensing(
+            MapTransform transform, ModeDisc disc, int degree, double rmsX, double rmsY) {
+        FlatGrid grid = disc.grid();
+        this.transform = transform;
+        this.disc = disc;
+        splines = SplineMaps.of(grid, degree);
+        filterX = BSpline.prefilter(degree, grid.nx(), rmsX / grid.pixel());
+        filterY = BSpline.prefilter(degree, grid.ny(), rmsY / grid.pixel());
+        first = new double[2 * grid.size()];
+        second = new double[2 * grid.size()];
+        dx = new double[grid.pixels()];
+        dy = new double[grid.pixels()];
+    }
+
+    /**
+     * Lensing of skies of given spectra.
+     *
+     * @param transform transform of the skies' grid
+     * @param disc the modes of the skies, as {@link GaussianSky#disc}
+     * @param unlensed spectra of the skies; only that of phi is used, for the rms displacement
+     * @param curl C_L^psipsi as a fraction of C_L^phiphi
+     * @param degree of the splines: 3, 5 or 7
+     * @throws IllegalArgumentException for another degree
+     */
+    public static SkyLensing of(
+            MapTransform transform, ModeDisc disc, Spectra unlensed, double curl, int degree) {
+        double[] variance = displacementVariance(disc, unlensed, curl);
+        return new SkyLensing(
+                transform, disc, degree, Math.sqrt(variance[0]), Math.sqrt(variance[1]));
+    }
+
+    /** Lensing with the prefilter of a stated rms displacement per axis, in radian. */
+    static SkyLensing withRms(MapTransform transform, ModeDisc disc, double rms, int degree) {
+        return new SkyLensing(transform, disc, degree, rms, rms);
+    }
+
+    /**
+     * The expected variance of the displacement along x and along y, in square radian, of the modes
+     * of a disc: (1/A) sum_l of l_x^2 C_l^phiphi + l_y^2 C_l^psipsi, and with x and y exchanged.
+     */
+    public static double[] displacementVariance(ModeDisc disc, Spectra unlensed, double curl) {
+        FlatGrid grid = disc.grid();
+        double alongX = 0;
+        double alongY = 0;
+        for (int ky = -disc.maxKy(); ky <= disc.maxKy(); ky++) {
+            for (int kx = 0; kx <= disc.last(ky); kx++) {
+                int mode = grid.mode(kx, ky);
+                double power =
+                        grid.multiplicity(mode)
+                                * unlensed.at(Spectrum.PP, grid.fullSkyMultipole(mode));
+                double lx = grid.lx(mode);
+                double ly = grid.ly(mode);
+                alongX += power * (lx * lx + curl * ly * ly);
+                alongY += power * (ly * ly + curl * lx * lx);
+            }
+        }
+        return new double[] {alongX / grid.area(), alongY / grid.area()};
+    }
+
+    /** Lensed maps of a sky whose modes lie in the disc. */
+    public StokesMaps lens(UnlensedSky sky) {
+        StokesMaps maps = StokesMaps.zero(disc.grid());
+        coefficients(sky, maps);
+        splines.load(maps);
+        displacement(sky);
+        splines.evaluate(dx, dy, maps);
+        return maps;
+    }
+
+    private void coefficients(UnlensedSky sky, StokesMaps maps) {
+        clear();
+        temperature(sky.temperature().values());
+        transform.toMap(first, disc, maps.t());
+        clear();
+        polarisation(sky.gradient().values(), sky.curl().map(Modes::values));
+        transform.toMap(first, disc, maps.q());
+        transform.toMap(second, disc, maps.u());
+    }
+
+    private void displacement(UnlensedSky sky) {
+        clear();
+        gradient(sky.phi().values(), first, second, 1, 1);
+        sky.psi().ifPresent(psi -> gradient(psi.values(), second, first, -1, 1));
+        transform.toMap(first, disc, dx);
+        transform.toMap(second, disc, dy);
+    }
+
+    /** The transform may have overwritten the half planes. */
+    private void clear() {
+        Arrays.fill(first, 0);
+        Arrays.fill(second, 0);
+    }
+
+    private void temperature(double[] t) {
+        for (int ky = -disc.maxKy(); ky <= disc.maxKy(); ky++) {
+            double row = filterY[Math.abs(ky)];
+            for (int kx = 0, at = start(ky); kx <= disc.last(ky); kx++, at += 2) {
+                double f = row * filterX[kx];
+                first[at] = f * t[at];
+                first[at + 1] = f * t[at + 1];
+            }
+        }
+    }
+
+    private void polarisation(double[] e, Optional<double[]> curl) {
+        FlatGrid grid = disc.grid();
+        double[] b = curl.orElse(null);
+        for (int ky = -disc.maxKy(); ky <= disc.maxKy(); ky++) {
+            double ly = ky * grid.stepY();
+            double row = filterY[Math.abs(ky)];
+            for (int kx = ky == 0 ? 1 : 0, at = start(ky) + 2 * kx;
+                    kx <= disc.last(ky);
+                    kx++, at += 2) {
+                double lx = kx * grid.stepX();
+                double f = row * filterX[kx] / (lx * lx + ly * ly);
+                double cos = f * (lx * lx - ly * ly);
+                double sin = f * 2 * lx * ly;
+                first[at] = cos * e[at];
+                first[at + 1] = cos * e[at + 1];
+                second[at] = sin * e[at];
+                second[at + 1] = sin * e[at + 1];
+                if (b != null) {
+                    first[at] -= sin * b[at];
+                    first[at + 1] -= sin * b[at + 1];
+                    second[at] += cos * b[at];
+                    second[at + 1] += cos * b[at + 1];
+                }
+            }
+        }
+    }
+
+    /** Adds i l_x f, times a sign, to one half plane and i l_y f to another, in pixels. */
+    private void gradient(double[] f, double[] alongX, double[] alongY, int signX, int signY) {
+        FlatGrid grid = disc.grid();
+        for (int ky = -disc.maxKy(); ky <= disc.maxKy(); ky++) {
+            double ly = signY * ky * grid.stepY() / grid.pixel();
+            for (int kx = 0, at = start(ky); kx <= disc.last(ky); kx++, at += 2) {
+                double lx = signX * kx * grid.stepX() / grid.pixel();
+                alongX[at] -= lx * f[at + 1];
+                alongX[at + 1] += lx * f[at];
+                alongY[at] -= ly * f[at + 1];
+                alongY[at + 1] += ly * f[at];
+            }
+        }
+    }
+
+    private int start(int ky) {
+        return 2 * disc.grid().mode(0, ky);
+    }
+}
