@@ -1,13 +1,16 @@
 package manyskies.flat;
 
 /**
- * The modes of a grid with |l| &le; limit, off the Nyquist rows and columns, row by row.
+ * The modes of a grid with |l| &le; limit, all below the Nyquist multipole, row by row.
  *
  * <p>Row ky holds the columns 0 .. {@code last(ky)}; rows run over |ky| &le; {@code maxKy()}. Loops
  * over a disc visit half as many modes as loops over the half plane, and need no test per mode.
  * Immutable.
  */
 public final class ModeDisc {
+    /** Far below one step of l, far above rounding. */
+    private static final double BELOW = 1e-9;
+
     private final FlatGrid grid;
     private final double limit;
     private final int[] last; // by |ky|
@@ -16,7 +19,7 @@ public final class ModeDisc {
         this.grid = grid;
         this.limit = limit;
         int rows = 0;
-        while (rows < grid.ny() / 2 && rows * grid.stepY() <= limit) {
+        while (rows < grid.ny() / 2 && grid.multipole(grid.mode(0, rows)) <= limit) {
             rows++;
         }
         last = new int[rows];
@@ -30,7 +33,7 @@ public final class ModeDisc {
     }
 
     /**
-     * The disc of a radius; one beyond the Nyquist multipole is cut by the edges of the plane.
+     * The disc of a radius; one beyond the Nyquist multipole ends just below it.
      *
      * @throws IllegalArgumentException if the limit is not a number of 0 or more
      */
@@ -39,7 +42,7 @@ public final class ModeDisc {
             throw new IllegalArgumentException(
                     "the limit of a disc of modes is a multipole of 0 or more, found " + limit);
         }
-        return new ModeDisc(grid, limit);
+        return new ModeDisc(grid, Math.min(limit, grid.nyquist() * (1 - BELOW)));
     }
 
     /** The grid. */
@@ -47,7 +50,7 @@ public final class ModeDisc {
         return grid;
     }
 
-    /** The radius asked for. */
+    /** The radius: the one asked for, or just below the Nyquist multipole. */
     public double limit() {
         return limit;
     }

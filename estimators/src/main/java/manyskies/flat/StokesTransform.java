@@ -11,59 +11,46 @@ import manyskies.field.Modes;
  * 0 of E and B, are zero. Holds scratch memory: one thread at a time.
  */
 public final class StokesTransform {
-    private final MapTransform transform;
     private final ModeDisc disc;
+    private final RealFft2 fft;
 
-    private StokesTransform(MapTransform transform, ModeDisc disc) {
-        this.transform = transform;
+    private StokesTransform(ModeDisc disc) {
         this.disc = disc;
+        fft = RealFft2.of(disc.grid(), disc.limit());
     }
 
     /**
      * The transform of the modes of a disc.
      *
-     * @throws IllegalArgumentException if disc and transform have different grids
+     * @throws IllegalArgumentException if a side of the grid cannot be transformed
      */
-    public static StokesTransform of(MapTransform transform, ModeDisc disc) {
-        if (!transform.grid().equals(disc.grid())) {
-            throw new IllegalArgumentException(
-                    "modes of " + disc.grid() + " cannot be transformed on " + transform.grid());
-        }
-        return new StokesTransform(transform, disc);
+    public static StokesTransform of(ModeDisc disc) {
+        return new StokesTransform(disc);
     }
 
     /** Maps of the disc's modes; others are ignored. */
     public StokesMaps synthesise(CmbModes modes) {
         StokesMaps maps = StokesMaps.zero(disc.grid());
-        double[] first = new double[2 * disc.grid().size()];
-        double[] second = new double[first.length];
-        copy(modes.temperature().values(), first);
-        transform.toMap(first, disc, maps.t());
-        java.util.Arrays.fill(first, 0);
-        rotate(modes.gradient().values(), modes.curl().values(), 1, first, second);
-        transform.toMap(first, disc, maps.q());
-        transform.toMap(second, disc, maps.u());
+        double[] q = new double[2 * disc.grid().size()];
+        double[] u = new double[q.length];
+        rotate(modes.gradient().values(), modes.curl().values(), 1, q, u);
+        fft.inverse(modes.temperature().values(), maps.t());
+        fft.inverse(q, maps.q());
+        fft.inverse(u, maps.u());
         return maps;
     }
 
-    /** Modes of the disc; others are zero. The maps are overwritten. */
+    /** Modes of the disc; others are zero. */
     public CmbModes analyse(StokesMaps maps) {
         double[] t = new double[2 * disc.grid().size()];
         double[] q = new double[t.length];
         double[] u = new double[t.length];
-        transform.toModes(maps.t(), disc, t);
-        transform.toModes(maps.q(), disc, q);
-        transform.toModes(maps.u(), disc, u);
+        fft.forward(maps.t(), t);
+        fft.forward(maps.q(), q);
+        fft.forward(maps.u(), u);
         rotate(q, u, -1, q, u);
         return new CmbModes(
                 Modes.of(disc.grid(), t), Modes.of(disc.grid(), q), Modes.of(disc.grid(), u));
-    }
-
-    private void copy(double[] from, double[] to) {
-        for (int ky = -disc.maxKy(); ky <= disc.maxKy(); ky++) {
-            int row = 2 * disc.grid().mode(0, ky);
-            System.arraycopy(from, row, to, row, 2 * (disc.last(ky) + 1));
-        }
     }
 
     /** (a + i b) exp(2 i sign phi) of a pair of real fields; in place if the arrays are the same. */

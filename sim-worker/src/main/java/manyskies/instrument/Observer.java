@@ -5,7 +5,6 @@ import java.util.List;
 import manyskies.field.CmbModes;
 import manyskies.field.Modes;
 import manyskies.flat.FlatGrid;
-import manyskies.flat.MapTransform;
 import manyskies.flat.ModeDisc;
 import manyskies.flat.StokesMaps;
 import manyskies.flat.StokesTransform;
@@ -30,7 +29,7 @@ public final class Observer {
     private final StokesTransform wanted; // the modes that are returned
     private final EdgeTaper taper; // or null
 
-    private Observer(MapTransform transform, Survey survey, ModeDisc disc, ModeDisc wanted) {
+    private Observer(Survey survey, ModeDisc disc, ModeDisc wanted) {
         grid = disc.grid();
         splits = survey.splits();
         GaussianBeam beam = new GaussianBeam(survey.beam());
@@ -39,8 +38,8 @@ public final class Observer {
                         BeamAndNoise.of(disc, "T", beam, survey.temperature(), splits),
                         BeamAndNoise.of(disc, "E", beam, survey.polarisation(), splits),
                         BeamAndNoise.of(disc, "B", beam, survey.polarisation(), splits));
-        signal = StokesTransform.of(transform, disc);
-        this.wanted = StokesTransform.of(transform, wanted);
+        signal = StokesTransform.of(disc);
+        this.wanted = StokesTransform.of(wanted);
         taper = survey.edgeTaper() == 0 ? null : EdgeTaper.of(grid, survey.edgeTaper());
     }
 
@@ -49,22 +48,17 @@ public final class Observer {
      *
      * @throws IllegalArgumentException if the survey's beam, splits or taper are impossible here
      */
-    public static Observer of(MapTransform transform, Survey survey, double limit) {
-        FlatGrid grid = transform.grid();
+    public static Observer of(FlatGrid grid, Survey survey, double limit) {
         ModeDisc wanted = ModeDisc.of(grid, limit);
         boolean tapered = survey.edgeTaper() != 0;
-        ModeDisc observed = tapered ? ModeDisc.of(grid, belowNyquist(grid)) : wanted;
-        return new Observer(transform, survey, observed, wanted);
-    }
-
-    private static double belowNyquist(FlatGrid grid) {
-        return grid.nyquist() * (1 - 1e-9);
+        ModeDisc observed = tapered ? ModeDisc.of(grid, grid.nyquist()) : wanted;
+        return new Observer(survey, observed, wanted);
     }
 
     /**
      * Observed modes, all splits together; beam (and taper) included.
      *
-     * @param sky lensed maps; overwritten
+     * @param sky lensed maps
      * @param noise address of the noise
      */
     public CmbModes observe(StokesMaps sky, Address noise) {
@@ -85,7 +79,7 @@ public final class Observer {
     /**
      * Observed maps, all splits together, of the modes this observer works with; to look at.
      *
-     * @param sky lensed maps; overwritten
+     * @param sky lensed maps
      */
     public StokesMaps observedMaps(StokesMaps sky, Address noise) {
         StokesMaps maps = signal.synthesise(coadd(signal.analyse(sky), noise));

@@ -47,7 +47,7 @@ public final class GaussianSky {
      *     or the fraction is negative
      */
     public static GaussianSky of(FlatGrid grid, Spectra unlensed, double curl) {
-        return of(ModeDisc.of(grid, defaultLimit(grid, unlensed)), unlensed, curl);
+        return of(ModeDisc.of(grid, unlensed.lmax() + 0.5), unlensed, curl);
     }
 
     /** The same, drawn within a disc of modes. */
@@ -58,10 +58,6 @@ public final class GaussianSky {
         }
         return new GaussianSky(
                 disc, SkyFactor.of(disc, unlensed), unlensed.has(Spectrum.BB), Math.sqrt(curl));
-    }
-
-    private static double defaultLimit(FlatGrid grid, Spectra unlensed) {
-        return Math.min(unlensed.lmax() + 0.5, grid.nyquist() * (1 - 1e-9));
     }
 
     /** The modes that are drawn. */

@@ -1,11 +1,10 @@
 package manyskies.sky;
 
-import java.util.Arrays;
 import java.util.Optional;
 import manyskies.field.Modes;
 import manyskies.flat.FlatGrid;
-import manyskies.flat.MapTransform;
 import manyskies.flat.ModeDisc;
+import manyskies.flat.RealFft2;
 import manyskies.flat.StokesMaps;
 import manyskies.spectrum.Spectra;
 import manyskies.spectrum.Spectrum;
@@ -21,21 +20,20 @@ import manyskies.spectrum.Spectrum;
  * <p>Holds scratch memory: one thread at a time. Results depend on the arguments alone.
  */
 public final class SkyLensing {
-    private final MapTransform transform;
     private final ModeDisc disc;
-    private final SplineMaps splines;
+    private final RealFft2 fft;
+    final SplineMaps splines;
     private final double[] filterX; // by kx
     private final double[] filterY; // by |ky|
     private final double[] first; // half planes
     private final double[] second;
-    private final double[] dx; // displacement maps in pixels
-    private final double[] dy;
+    final double[] dx; // displacement maps in pixels
+    final double[] dy;
 
-    private SkyLensing(
-            MapTransform transform, ModeDisc disc, int degree, double rmsX, double rmsY) {
+    private SkyLensing(ModeDisc disc, int degree, double rmsX, double rmsY) {
         FlatGrid grid = disc.grid();
-        this.transform = transform;
         this.disc = disc;
+        fft = RealFft2.of(grid, disc.limit());
         splines = SplineMaps.of(grid, degree);
         filterX = BSpline.prefilter(degree, grid.nx(), rmsX / grid.pixel());
         filterY = BSpline.prefilter(degree, grid.ny(), rmsY / grid.pixel());
@@ -48,23 +46,20 @@ public final class SkyLensing {
     /**
      * Lensing of skies of given spectra.
      *
-     * @param transform transform of the skies' grid
      * @param disc the modes of the skies, as {@link GaussianSky#disc}
      * @param unlensed spectra of the skies; only that of phi is used, for the rms displacement
      * @param curl C_L^psipsi as a fraction of C_L^phiphi
      * @param degree of the splines: 3, 5 or 7
      * @throws IllegalArgumentException for another degree
      */
-    public static SkyLensing of(
-            MapTransform transform, ModeDisc disc, Spectra unlensed, double curl, int degree) {
+    public static SkyLensing of(ModeDisc disc, Spectra unlensed, double curl, int degree) {
         double[] variance = displacementVariance(disc, unlensed, curl);
-        return new SkyLensing(
-                transform, disc, degree, Math.sqrt(variance[0]), Math.sqrt(variance[1]));
+        return new SkyLensing(disc, degree, Math.sqrt(variance[0]), Math.sqrt(variance[1]));
     }
 
     /** Lensing with the prefilter of a stated rms displacement per axis, in radian. */
-    static SkyLensing withRms(MapTransform transform, ModeDisc disc, double rms, int degree) {
-        return new SkyLensing(transform, disc, degree, rms, rms);
+    static SkyLensing withRms(ModeDisc disc, double rms, int degree) {
+        return new SkyLensing(disc, degree, rms, rms);
     }
 
     /**
@@ -100,28 +95,19 @@ public final class SkyLensing {
         return maps;
     }
 
-    private void coefficients(UnlensedSky sky, StokesMaps maps) {
-        clear();
+    void coefficients(UnlensedSky sky, StokesMaps maps) {
         temperature(sky.temperature().values());
-        transform.toMap(first, disc, maps.t());
-        clear();
+        fft.inverse(first, maps.t());
         polarisation(sky.gradient().values(), sky.curl().map(Modes::values));
-        transform.toMap(first, disc, maps.q());
-        transform.toMap(second, disc, maps.u());
+        fft.inverse(first, maps.q());
+        fft.inverse(second, maps.u());
     }
 
-    private void displacement(UnlensedSky sky) {
-        clear();
-        gradient(sky.phi().values(), first, second, 1, 1);
-        sky.psi().ifPresent(psi -> gradient(psi.values(), second, first, -1, 1));
-        transform.toMap(first, disc, dx);
-        transform.toMap(second, disc, dy);
-    }
-
-    /** The transform may have overwritten the half planes. */
-    private void clear() {
-        Arrays.fill(first, 0);
-        Arrays.fill(second, 0);
+    void displacement(UnlensedSky sky) {
+        gradient(sky.phi().values());
+        sky.psi().ifPresent(psi -> addCurl(psi.values()));
+        fft.inverse(first, dx);
+        fft.inverse(second, dy);
     }
 
     private void temperature(double[] t) {
@@ -138,14 +124,13 @@ public final class SkyLensing {
     private void polarisation(double[] e, Optional<double[]> curl) {
         FlatGrid grid = disc.grid();
         double[] b = curl.orElse(null);
+        double smallest = Double.MIN_NORMAL; // keeps l = 0, which has no direction, at zero
         for (int ky = -disc.maxKy(); ky <= disc.maxKy(); ky++) {
             double ly = ky * grid.stepY();
             double row = filterY[Math.abs(ky)];
-            for (int kx = ky == 0 ? 1 : 0, at = start(ky) + 2 * kx;
-                    kx <= disc.last(ky);
-                    kx++, at += 2) {
+            for (int kx = 0, at = start(ky); kx <= disc.last(ky); kx++, at += 2) {
                 double lx = kx * grid.stepX();
-                double f = row * filterX[kx] / (lx * lx + ly * ly);
+                double f = row * filterX[kx] / Math.max(lx * lx + ly * ly, smallest);
                 double cos = f * (lx * lx - ly * ly);
                 double sin = f * 2 * lx * ly;
                 first[at] = cos * e[at];
@@ -162,17 +147,32 @@ public final class SkyLensing {
         }
     }
 
-    /** Adds i l_x f, times a sign, to one half plane and i l_y f to another, in pixels. */
-    private void gradient(double[] f, double[] alongX, double[] alongY, int signX, int signY) {
+    /** i l phi, in pixels. */
+    private void gradient(double[] phi) {
         FlatGrid grid = disc.grid();
         for (int ky = -disc.maxKy(); ky <= disc.maxKy(); ky++) {
-            double ly = signY * ky * grid.stepY() / grid.pixel();
+            double ly = ky * grid.stepY() / grid.pixel();
             for (int kx = 0, at = start(ky); kx <= disc.last(ky); kx++, at += 2) {
-                double lx = signX * kx * grid.stepX() / grid.pixel();
-                alongX[at] -= lx * f[at + 1];
-                alongX[at + 1] += lx * f[at];
-                alongY[at] -= ly * f[at + 1];
-                alongY[at + 1] += ly * f[at];
+                double lx = kx * grid.stepX() / grid.pixel();
+                first[at] = -lx * phi[at + 1];
+                first[at + 1] = lx * phi[at];
+                second[at] = -ly * phi[at + 1];
+                second[at + 1] = ly * phi[at];
+            }
+        }
+    }
+
+    /** Adds i (l_y, -l_x) psi, in pixels. */
+    private void addCurl(double[] psi) {
+        FlatGrid grid = disc.grid();
+        for (int ky = -disc.maxKy(); ky <= disc.maxKy(); ky++) {
+            double ly = ky * grid.stepY() / grid.pixel();
+            for (int kx = 0, at = start(ky); kx <= disc.last(ky); kx++, at += 2) {
+                double lx = kx * grid.stepX() / grid.pixel();
+                first[at] -= ly * psi[at + 1];
+                first[at + 1] += ly * psi[at];
+                second[at] += lx * psi[at + 1];
+                second[at + 1] -= lx * psi[at];
             }
         }
     }
