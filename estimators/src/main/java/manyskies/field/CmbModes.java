@@ -14,4 +14,13 @@ public record CmbModes(Modes temperature, Modes gradient, Modes curl) {
         temperature.requireSameSpace(gradient);
         temperature.requireSameSpace(curl);
     }
+
+    /** The modes of one field. */
+    public Modes of(SkyField field) {
+        return switch (field) {
+            case T -> temperature;
+            case E -> gradient;
+            case B -> curl;
+        };
+    }
 }
