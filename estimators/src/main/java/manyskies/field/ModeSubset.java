@@ -95,9 +95,9 @@ public final class ModeSubset implements ModeSpace {
     @Override
     public boolean equals(Object other) {
         return this == other
-                || other instanceof ModeSubset subset
+                || (other instanceof ModeSubset subset
                         && whole.equals(subset.whole)
-                        && Arrays.equals(modes, subset.modes);
+                        && Arrays.equals(modes, subset.modes));
     }
 
     @Override
