@@ -162,6 +162,17 @@ public final class MeanVector {
      * @throws IllegalArgumentException if an element has no scatter
      */
     public Measurement weightedMean() {
+        double[] weights = inverseVariances();
+        double variance = covariance.varianceOf(weights) / count();
+        return new Measurement(product(weights, mean), Math.sqrt(variance), count());
+    }
+
+    /**
+     * Weights 1 / C_ii, scaled so that their sum is one.
+     *
+     * @throws IllegalArgumentException if an element has no scatter
+     */
+    public double[] inverseVariances() {
         double[] weights = new double[mean.length];
         double total = 0;
         for (int i = 0; i < weights.length; i++) {
@@ -172,8 +183,7 @@ public final class MeanVector {
         for (int i = 0; i < weights.length; i++) {
             weights[i] /= total;
         }
-        double variance = covariance.varianceOf(weights) / count();
-        return new Measurement(product(weights, mean), Math.sqrt(variance), count());
+        return weights;
     }
 
     /**
