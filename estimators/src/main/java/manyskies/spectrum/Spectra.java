@@ -85,4 +85,27 @@ public final class Spectra implements Serializable {
         all.putAll(replaced);
         return of(lmax, all);
     }
+
+    /** Whether every C_l is the same; a spectrum that was not given equals zeros. */
+    @Override
+    public boolean equals(Object other) {
+        if (!(other instanceof Spectra spectra) || lmax != spectra.lmax) {
+            return false;
+        }
+        for (Spectrum name : Spectrum.values()) {
+            if (!Arrays.equals(values(name), spectra.values(name))) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    @Override
+    public int hashCode() {
+        int hash = lmax;
+        for (Spectrum name : Spectrum.values()) {
+            hash = 31 * hash + Arrays.hashCode(values(name));
+        }
+        return hash;
+    }
 }

@@ -28,4 +28,10 @@ public record Specification(
         Analysis analysis,
         Sets sets,
         int block)
-        implements Serializable {}
+        implements Serializable {
+
+    /** The same run with another note of where its spectra were read. */
+    public Specification withSpectraFile(String file) {
+        return new Specification(name, seed, patch, unlensed, file, survey, analysis, sets, block);
+    }
+}
