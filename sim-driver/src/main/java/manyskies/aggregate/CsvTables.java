@@ -6,8 +6,8 @@ import java.util.List;
 /**
  * Tables as comma-separated text, with a header line.
  *
- * <p>Numbers are written as {@code Double.toString} does: with as many digits as tell them from
- * their neighbours, so that equal bits give equal files and reading gives the bits back.
+ * <p>Numbers have as many digits as tell them from their neighbours ({@link Numbers}), so that equal
+ * bits give equal files and reading gives the bits back.
  */
 final class CsvTables {
     private CsvTables() {}
@@ -19,11 +19,11 @@ final class CsvTables {
             text.append(row.estimator()).append(',');
             text.append(row.quantity()).append(',');
             text.append(row.band()).append(',');
-            text.append(row.lMin()).append(',');
-            text.append(row.lMax()).append(',');
-            text.append(row.lMean()).append(',');
-            text.append(row.measurement().value()).append(',');
-            text.append(row.measurement().error()).append(',');
+            text.append(Numbers.text(row.lMin())).append(',');
+            text.append(Numbers.text(row.lMax())).append(',');
+            text.append(Numbers.text(row.lMean())).append(',');
+            text.append(Numbers.text(row.measurement().value())).append(',');
+            text.append(Numbers.text(row.measurement().error())).append(',');
             text.append(row.measurement().count()).append('\n');
         }
         return text.toString().getBytes(StandardCharsets.UTF_8);
@@ -47,8 +47,8 @@ final class CsvTables {
         text.append(i).append(',').append(j).append(',');
         text.append(table.estimator(i)).append(',').append(table.band(i)).append(',');
         text.append(table.estimator(j)).append(',').append(table.band(j)).append(',');
-        text.append(covariance.value(i, j)).append(',');
-        text.append(covariance.error(i, j)).append(',');
+        text.append(Numbers.text(covariance.value(i, j))).append(',');
+        text.append(Numbers.text(covariance.error(i, j))).append(',');
         text.append(covariance.count()).append('\n');
     }
 }

@@ -18,13 +18,13 @@ public final class HeadlineTable {
                     "transfer",
                     "chi2",
                     "PTE",
-                    "transfer is 1",
-                    "curl x phi is 0",
+                    "verdict",
+                    "curl x phi",
                     "N0 MC/analytic",
                     "S/N");
 
     /** However small an error is. */
-    private static final int MOST_DECIMALS = 6;
+    private static final int MOST_DECIMALS = 5;
 
     private HeadlineTable() {}
 
@@ -58,13 +58,18 @@ public final class HeadlineTable {
                 test.map(t -> probability(t.probabilityToExceed())).orElse("-"),
                 words(e.transfer(), threshold),
                 words(e.curl(), threshold),
-                number(e.n0().mean()),
+                number(e.n0().mean()) + mark(e.n0(), threshold),
                 e.signalToNoise().map(s -> format(1, s)).orElse("-"));
     }
 
     private static String words(Check check, double threshold) {
         Verdict verdict = check.verdict(threshold);
         return verdict == Verdict.TOO_FEW ? "needs " + check.needed() : verdict.words();
+    }
+
+    /** The ratio of n0 has no column for its verdict. */
+    private static String mark(Check check, double threshold) {
+        return check.verdict(threshold) == Verdict.INCONSISTENT ? " *" : "";
     }
 
     private static String probability(double p) {
@@ -109,9 +114,9 @@ public final class HeadlineTable {
     private static String legend(Summary summary) {
         return String.format(
                 Locale.ROOT,
-                "Look for 'inconsistent': it stands where the probability to exceed (PTE) is below"
-                        + " %.1e\n(%s shared by %d checks). Transfer and N0 ratio are means over"
-                        + " bands; bands are in bandpowers.csv.\n",
+                "Look for 'inconsistent' (for N0: *): a probability to exceed (PTE) below %.1e, which"
+                        + " is\n%s shared by %d checks. Transfer should be 1, curl x phi 0, N0 ratio"
+                        + " 1; bands: bandpowers.csv\n",
                 summary.threshold(),
                 Summary.FALSE_ALARM,
                 summary.verdicts());

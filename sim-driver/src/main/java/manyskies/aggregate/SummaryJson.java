@@ -2,6 +2,7 @@ package manyskies.aggregate;
 
 import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonGenerator;
+import com.fasterxml.jackson.core.StreamWriteFeature;
 import com.fasterxml.jackson.core.util.DefaultIndenter;
 import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
 import java.io.ByteArrayOutputStream;
@@ -13,6 +14,10 @@ import manyskies.statistic.Measurement;
 
 /** The summary as JSON, for scripts; keys in a fixed order, numbers in full precision. */
 final class SummaryJson {
+    /** Writes numbers as {@link Numbers} does. */
+    private static final JsonFactory FACTORY =
+            JsonFactory.builder().enable(StreamWriteFeature.USE_FAST_DOUBLE_WRITER).build();
+
     private final JsonGenerator json;
     private final Summary summary;
 
@@ -24,7 +29,7 @@ final class SummaryJson {
     static byte[] encode(Summary summary) {
         ByteArrayOutputStream bytes = new ByteArrayOutputStream();
         DefaultIndenter indenter = new DefaultIndenter("  ", "\n"); // the same on every host
-        try (JsonGenerator json = new JsonFactory().createGenerator(bytes)) {
+        try (JsonGenerator json = FACTORY.createGenerator(bytes)) {
             json.setPrettyPrinter(new DefaultPrettyPrinter().withObjectIndenter(indenter));
             new SummaryJson(json, summary).write();
             json.writeRaw("\n");

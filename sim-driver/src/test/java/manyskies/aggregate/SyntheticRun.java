@@ -37,10 +37,15 @@ record SyntheticRun(long seed, int count, int block, int pairs, double transfer,
     }
 
     static AnalyticBands known() {
+        return known(N0);
+    }
+
+    /** What is known of the run, with the given belief of n0. */
+    static AnalyticBands known(double n0) {
         Map<String, double[]> vectors = new TreeMap<>();
         for (String e : ESTIMATORS) {
             vectors.put(e + ".response", new double[] {10, 20, 30});
-            vectors.put(e + ".n0_analytic", new double[] {N0, N0, N0});
+            vectors.put(e + ".n0_analytic", new double[] {n0, n0, n0});
             vectors.put(e + ".curl_n0_analytic", new double[] {1.5, 1.5, 1.5});
         }
         return AnalyticBands.of(ESTIMATORS, BANDS, GRID, vectors);

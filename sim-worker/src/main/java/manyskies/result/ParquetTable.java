@@ -2,8 +2,6 @@ package manyskies.result;
 
 import java.io.IOException;
 import java.io.UncheckedIOException;
-import java.util.ArrayList;
-import java.util.List;
 import org.apache.parquet.conf.PlainParquetConfiguration;
 import org.apache.parquet.example.data.Group;
 import org.apache.parquet.example.data.simple.SimpleGroupFactory;
@@ -19,7 +17,7 @@ import org.apache.parquet.schema.Types;
 /**
  * A small table of whole numbers, numbers and texts as the bytes of a Parquet file.
  *
- * <p>All columns are required. Uncompressed, one row group, default encodings, so that any reader
+ * <p>All columns are required. Uncompressed, default encodings, so that any reader
  * opens it; equal rows give equal bytes.
  */
 public final class ParquetTable {
@@ -60,13 +58,26 @@ public final class ParquetTable {
         return new Rows(schema.named(name));
     }
 
-    /** Rows of a table, in order. */
+    /** Rows of a table, in order; they are encoded as they come. */
     public static final class Rows {
         private final MessageType schema;
-        private final List<Group> groups = new ArrayList<>();
+        private final SimpleGroupFactory groups;
+        private final MemoryOutput memory = new MemoryOutput();
+        private final ParquetWriter<Group> writer;
 
         private Rows(MessageType schema) {
             this.schema = schema;
+            groups = new SimpleGroupFactory(schema);
+            try {
+                writer =
+                        ExampleParquetWriter.builder(memory)
+                                .withConf(new PlainParquetConfiguration())
+                                .withType(schema)
+                                .withCompressionCodec(CompressionCodecName.UNCOMPRESSED)
+                                .build();
+            } catch (IOException e) { // memory does not fail
+                throw new UncheckedIOException(e);
+            }
         }
 
         /**
@@ -86,11 +97,15 @@ public final class ParquetTable {
                                 + values.length
                                 + " values");
             }
-            Group group = new SimpleGroupFactory(schema).newGroup();
+            Group group = groups.newGroup();
             for (int column = 0; column < values.length; column++) {
                 put(group, column, values[column]);
             }
-            groups.add(group);
+            try {
+                writer.write(group);
+            } catch (IOException e) {
+                throw new UncheckedIOException(e);
+            }
         }
 
         private void put(Group group, int column, Object value) {
@@ -115,19 +130,11 @@ public final class ParquetTable {
             }
         }
 
-        /** The bytes of the file. */
+        /** The bytes of the file; no row can follow. */
         public byte[] encode() {
-            MemoryOutput memory = new MemoryOutput();
-            try (ParquetWriter<Group> writer =
-                    ExampleParquetWriter.builder(memory)
-                            .withConf(new PlainParquetConfiguration())
-                            .withType(schema)
-                            .withCompressionCodec(CompressionCodecName.UNCOMPRESSED)
-                            .build()) {
-                for (Group group : groups) {
-                    writer.write(group);
-                }
-            } catch (IOException e) { // memory does not fail
+            try {
+                writer.close();
+            } catch (IOException e) {
                 throw new UncheckedIOException(e);
             }
             return memory.bytes();
