@@ -1,5 +1,7 @@
 package manyskies.flat;
 
+import java.util.Arrays;
+
 /**
  * The modes of a grid with |l| at most a limit, as one run of columns per row.
  *
@@ -12,11 +14,7 @@ final class BandLimit {
 
     private BandLimit(int[] lastOfRow) {
         this.lastOfRow = lastOfRow;
-        int last = 0;
-        for (int row : lastOfRow) {
-            last = Math.max(last, row);
-        }
-        this.lastColumn = last;
+        lastColumn = Arrays.stream(lastOfRow).max().orElse(-1);
     }
 
     /**
@@ -61,5 +59,14 @@ final class BandLimit {
     /** The last column in which any row has a wanted mode. */
     int lastColumn() {
         return lastColumn;
+    }
+
+    /** The largest |ky| of which column kx has a wanted mode, or -1. */
+    int lastKy(int kx) {
+        int ky = lastOfRow.length / 2;
+        while (ky >= 0 && lastOfRow[ky] < kx) {
+            ky--;
+        }
+        return ky;
     }
 }

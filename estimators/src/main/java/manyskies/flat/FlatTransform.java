@@ -1,5 +1,7 @@
 package manyskies.flat;
 
+import java.util.HashMap;
+import java.util.Map;
 import manyskies.field.GradientCurl;
 import manyskies.field.Modes;
 import manyskies.field.SkyTransform;
@@ -18,18 +20,23 @@ import manyskies.field.SpinMap;
  */
 public final class FlatTransform implements SkyTransform {
     private final FlatGrid grid;
+    private final BandLimit band;
     private final RealFft2 fft;
-    private final SpinFactor factor;
-    private final double[] partRe;
-    private final double[] partIm;
+    private final Map<Integer, SpinFactor> factorOfSpin = new HashMap<>(); // built when first used
+    private final ColumnTiles tilesRe;
+    private final ColumnTiles tilesIm;
+    private final double[] rowRe;
+    private final double[] rowIm;
     private long transforms;
 
     private FlatTransform(FlatGrid grid, double bandLimit) {
         this.grid = grid;
+        band = BandLimit.of(grid, bandLimit);
         fft = RealFft2.of(grid, bandLimit);
-        factor = SpinFactor.of(grid, BandLimit.of(grid, bandLimit));
-        partRe = new double[2 * grid.size()];
-        partIm = new double[2 * grid.size()];
+        tilesRe = fft.newTiles();
+        tilesIm = fft.newTiles();
+        rowRe = new double[grid.nx()];
+        rowIm = new double[grid.nx()];
     }
 
     /**
@@ -66,43 +73,63 @@ public final class FlatTransform implements SkyTransform {
     @Override
     public SpinMap synthesise(int spin, Modes gradient, Modes curl) {
         requireArguments(spin, gradient, curl);
+        transforms += spin == 0 ? 1 : 2;
+        double[] re = new double[pixels()];
         if (spin == 0) {
-            return SpinMap.scalar(map(gradient.values()));
+            fft.inverse(gradient.values(), re);
+            return SpinMap.scalar(re);
         }
-        double[] curlValues = curl == null ? null : curl.values();
-        factor.raise(spin, gradient.values(), curlValues, partRe, partIm);
-        return SpinMap.of(spin, map(partRe), map(partIm));
+        double[] im = new double[pixels()];
+        raise(factor(spin), gradient.values(), curl == null ? null : curl.values());
+        fft.clearNyquist();
+        fft.tilesToMap(tilesRe, re);
+        fft.tilesToMap(tilesIm, im);
+        return SpinMap.of(spin, re, im);
     }
 
     @Override
     public GradientCurl analyse(SpinMap map) {
+        requirePixels(map);
+        transforms += map.spin() == 0 ? 1 : 2;
+        double[] gradient = new double[2 * grid.size()];
+        if (map.spin() == 0) {
+            fft.forward(map.re(), gradient);
+            return new GradientCurl(Modes.of(grid, gradient), null);
+        }
+        double[] curl = new double[2 * grid.size()];
+        fft.mapToTiles(map.re(), tilesRe);
+        fft.mapToTiles(map.im(), tilesIm);
+        lower(factor(map.spin()), gradient, curl);
+        return new GradientCurl(Modes.of(grid, gradient), Modes.of(grid, curl));
+    }
+
+    private SpinFactor factor(int spin) {
+        return factorOfSpin.computeIfAbsent(spin, s -> SpinFactor.of(grid, band, s));
+    }
+
+    private void raise(SpinFactor factor, double[] gradient, double[] curl) {
+        for (int row = 0; row < grid.ny(); row++) {
+            int columns = fft.storedColumns(row);
+            factor.raise(row, columns, gradient, curl, rowRe, rowIm);
+            tilesRe.putRow(row, rowRe, 0, 2 * columns);
+            tilesIm.putRow(row, rowIm, 0, 2 * columns);
+        }
+    }
+
+    private void lower(SpinFactor factor, double[] gradient, double[] curl) {
+        for (int row = 0; row < grid.ny(); row++) {
+            int columns = fft.storedColumns(row);
+            tilesRe.getRow(row, rowRe, 0, 2 * columns);
+            tilesIm.getRow(row, rowIm, 0, 2 * columns);
+            factor.lower(row, columns, rowRe, rowIm, gradient, curl);
+        }
+    }
+
+    private void requirePixels(SpinMap map) {
         if (map.re().length != pixels()) {
             throw new IllegalArgumentException(
                     "a map of this patch has " + pixels() + " pixels, found " + map.re().length);
         }
-        if (map.spin() == 0) {
-            double[] field = new double[2 * grid.size()];
-            modes(map.re(), field);
-            return new GradientCurl(Modes.of(grid, field), null);
-        }
-        modes(map.re(), partRe);
-        modes(map.im(), partIm);
-        double[] gradient = new double[2 * grid.size()];
-        double[] curl = new double[2 * grid.size()];
-        factor.lower(map.spin(), partRe, partIm, gradient, curl);
-        return new GradientCurl(Modes.of(grid, gradient), Modes.of(grid, curl));
-    }
-
-    private double[] map(double[] modes) {
-        double[] map = new double[pixels()];
-        fft.inverse(modes, map);
-        transforms++;
-        return map;
-    }
-
-    private void modes(double[] map, double[] modes) {
-        fft.forward(map, modes);
-        transforms++;
     }
 
     private void requireArguments(int spin, Modes gradient, Modes curl) {

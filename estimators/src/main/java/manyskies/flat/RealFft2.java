@@ -13,20 +13,13 @@ import org.visnow.jlargearrays.ConcurrencyUtils;
  * {@code forward}. Maps are ny rows of nx pixels; modes are the half plane of {@link FlatGrid},
  * interleaved. Of the self-conjugate columns kx = 0 and nx/2 the Hermitian part is what counts.
  *
- * <p>Rows are real transforms of length nx, columns complex ones of length ny. Only columns within
- * the limit are transformed. Columns travel {@value #BATCH} at a time through a contiguous buffer,
- * and rows and columns of the scratch memory are padded, because strides of a power of two would
- * make all of them compete for the same few cache lines.
+ * <p>Two passes, rows as real transforms of length nx and columns as complex ones of length ny,
+ * with {@link ColumnTiles} between them. Only columns within the limit are transformed; beyond it
+ * nothing is moved either, since moving costs nearly as much as transforming.
  *
  * <p>Holds plans and scratch memory: one thread at a time.
  */
 public final class RealFft2 {
-    /** Columns gathered at once: two cache lines of a row. */
-    private static final int BATCH = 8;
-
-    /** Doubles by which a stride is lengthened: one cache line. */
-    private static final int PADDING = 8;
-
     static {
         // before any plan: plans must not start threads of their own
         ConcurrencyUtils.setNumberOfThreads(1);
@@ -36,24 +29,27 @@ public final class RealFft2 {
     private final BandLimit band;
     private final DoubleFFT_1D alongX;
     private final DoubleFFT_1D alongY;
+    private final double forwardScale;
     private final double inverseScale;
-    private final int columns; // those within the limit
-    private final double[] rows; // transformed along x only
-    private final int rowStride;
-    private final double[] batch;
-    private final int batchStride;
+    private final int columns; // those within the limit; nx/2 travels packed with 0
+    private final int[] lastKyOfTile;
+    private final ColumnTiles tiles;
+    private final double[] row;
+    private final double[] nyquist; // the column kx = nx/2
 
     private RealFft2(FlatGrid grid, BandLimit band) {
         this.grid = grid;
         this.band = band;
         alongX = new DoubleFFT_1D(grid.nx());
         alongY = new DoubleFFT_1D(grid.ny());
+        forwardScale = grid.pixel() * grid.pixel();
         inverseScale = 1 / (grid.area() * unscaled(alongX, grid.nx()));
-        columns = band.lastColumn() + 1;
-        rowStride = 2 * columns + PADDING;
-        rows = new double[grid.ny() * rowStride];
-        batchStride = 2 * grid.ny() + PADDING;
-        batch = new double[Math.max(BATCH * batchStride, grid.nx())]; // also holds a row
+        columns = Math.min(band.lastColumn() + 1, grid.nx() / 2);
+        tiles = newTiles();
+        lastKyOfTile = new int[tiles.tiles()];
+        Arrays.setAll(lastKyOfTile, tile -> band.lastKy(tile * ColumnTiles.WIDTH));
+        row = new double[grid.nx()];
+        nyquist = new double[2 * grid.ny()];
     }
 
     /**
@@ -86,17 +82,14 @@ public final class RealFft2 {
      */
     public void inverse(double[] modes, double[] map) {
         requireLengths(map, modes);
-        for (int first = 0; first < columns; first += BATCH) {
-            int count = Math.min(BATCH, columns - first);
-            gatherModes(modes, first, count);
-            for (int column = 0; column < count; column++) {
-                alongY.complexInverse(batch, column * batchStride, false);
-            }
-            scatterToRows(first, count);
+        for (int y = 0; y < grid.ny(); y++) {
+            int start = 2 * y * grid.columns();
+            tiles.putRow(y, modes, start, 2 * storedColumns(y));
+            boolean wanted = band.last(y) == grid.nx() / 2;
+            nyquist[2 * y] = wanted ? modes[start + grid.nx()] : 0;
+            nyquist[2 * y + 1] = wanted ? modes[start + grid.nx() + 1] : 0;
         }
-        for (int row = 0; row < grid.ny(); row++) {
-            inverseRow(map, row);
-        }
+        tilesToMap(tiles, map);
     }
 
     /**
@@ -108,99 +101,80 @@ public final class RealFft2 {
      */
     public void forward(double[] map, double[] modes) {
         requireLengths(map, modes);
-        for (int row = 0; row < grid.ny(); row++) {
-            forwardRow(map, row);
-        }
-        for (int first = 0; first < columns; first += BATCH) {
-            int count = Math.min(BATCH, columns - first);
-            gatherFromRows(first, count);
-            for (int column = 0; column < count; column++) {
-                alongY.complexForward(batch, column * batchStride);
-            }
-            scatterModes(modes, first, count);
-        }
-        clearBeyondLimit(modes);
-    }
-
-    private void gatherModes(double[] modes, int first, int count) {
-        for (int row = 0; row < grid.ny(); row++) {
-            int from = 2 * (row * grid.columns() + first);
-            int to = 2 * row;
-            int wanted = Math.max(0, Math.min(count, band.last(row) + 1 - first));
-            for (int column = 0; column < wanted; column++) {
-                batch[to + column * batchStride] = inverseScale * modes[from + 2 * column];
-                batch[to + column * batchStride + 1] = inverseScale * modes[from + 2 * column + 1];
-            }
-            for (int column = wanted; column < count; column++) {
-                batch[to + column * batchStride] = 0;
-                batch[to + column * batchStride + 1] = 0;
+        mapToTiles(map, tiles);
+        for (int y = 0; y < grid.ny(); y++) {
+            int start = 2 * y * grid.columns();
+            int end = start + 2 * grid.columns();
+            int stored = start + 2 * storedColumns(y);
+            tiles.getRow(y, modes, start, stored - start);
+            Arrays.fill(modes, stored, end, 0.0);
+            if (band.last(y) == grid.nx() / 2) {
+                modes[end - 2] = nyquist[2 * y];
+                modes[end - 1] = nyquist[2 * y + 1];
             }
         }
     }
 
-    private void scatterToRows(int first, int count) {
-        for (int row = 0; row < grid.ny(); row++) {
-            int to = row * rowStride + 2 * first;
-            int from = 2 * row;
-            for (int column = 0; column < count; column++) {
-                rows[to + 2 * column] = batch[from + column * batchStride];
-                rows[to + 2 * column + 1] = batch[from + column * batchStride + 1];
+    /** Scratch memory of the size of this transform. */
+    ColumnTiles newTiles() {
+        return new ColumnTiles(grid.ny(), columns);
+    }
+
+    /** Sets the column kx = nx/2 to zero, for those who fill tiles themselves. */
+    void clearNyquist() {
+        Arrays.fill(nyquist, 0.0);
+    }
+
+    /** How many columns of a row lie within the limit and in the tiles. */
+    int storedColumns(int y) {
+        return Math.min(band.last(y) + 1, grid.nx() / 2);
+    }
+
+    /** From modes within the limit to a map. */
+    void tilesToMap(ColumnTiles from, double[] map) {
+        for (int tile = 0; tile < from.tiles(); tile++) {
+            from.tileToBatch(tile, lastKyOfTile[tile]);
+            if (tile == 0) {
+                SelfConjugate.pack(from.batch(), 0, nyquist, grid.ny());
             }
-        }
-    }
-
-    private void gatherFromRows(int first, int count) {
-        for (int row = 0; row < grid.ny(); row++) {
-            int from = row * rowStride + 2 * first;
-            int to = 2 * row;
-            for (int column = 0; column < count; column++) {
-                batch[to + column * batchStride] = rows[from + 2 * column];
-                batch[to + column * batchStride + 1] = rows[from + 2 * column + 1];
+            for (int column = 0; column < width(tile); column++) {
+                alongY.complexInverse(from.batch(), from.column(column), false);
             }
+            from.batchToTile(tile, grid.ny(), inverseScale);
+        }
+        for (int y = 0; y < grid.ny(); y++) {
+            int start = y * grid.nx();
+            from.getRow(y, map, start, 2 * columns);
+            Arrays.fill(map, start + 2 * columns, start + grid.nx(), 0.0);
+            alongX.realInverse(
+                    map, start, false); // takes X_{nx/2} where Im X_0 would be, as packed
         }
     }
 
-    private void scatterModes(double[] modes, int first, int count) {
-        double scale = grid.pixel() * grid.pixel();
-        for (int row = 0; row < grid.ny(); row++) {
-            int to = 2 * (row * grid.columns() + first);
-            int from = 2 * row;
-            int wanted = Math.min(count, band.last(row) + 1 - first);
-            for (int column = 0; column < wanted; column++) {
-                modes[to + 2 * column] = scale * batch[from + column * batchStride];
-                modes[to + 2 * column + 1] = scale * batch[from + column * batchStride + 1];
+    /** From a map to its modes within the limit. */
+    void mapToTiles(double[] map, ColumnTiles to) {
+        for (int y = 0; y < grid.ny(); y++) {
+            System.arraycopy(map, y * grid.nx(), row, 0, grid.nx());
+            alongX.realForward(row); // leaves X_{nx/2} where Im X_0 would be
+            to.putRow(y, row, 0, 2 * columns);
+        }
+        for (int tile = 0; tile < to.tiles(); tile++) {
+            to.tileToBatch(tile, grid.ny());
+            for (int column = 0; column < width(tile); column++) {
+                alongY.complexForward(to.batch(), to.column(column));
             }
+            if (tile == 0) {
+                SelfConjugate.unpack(to.batch(), 0, nyquist, grid.ny());
+            }
+            to.batchToTile(tile, lastKyOfTile[tile], forwardScale);
+        }
+        for (int i = 0; i < nyquist.length; i++) {
+            nyquist[i] *= forwardScale;
         }
     }
 
-    private void clearBeyondLimit(double[] modes) {
-        for (int row = 0; row < grid.ny(); row++) {
-            int start = 2 * row * grid.columns();
-            Arrays.fill(modes, start + 2 * (band.last(row) + 1), start + 2 * grid.columns(), 0.0);
-        }
-    }
-
-    /** JTransforms packs the real X_{n/2} where the imaginary part of X_0 would be. */
-    private void inverseRow(double[] map, int row) {
-        int start = row * grid.nx();
-        int from = row * rowStride;
-        int stored = Math.min(2 * columns, grid.nx());
-        System.arraycopy(rows, from, map, start, stored);
-        Arrays.fill(map, start + stored, start + grid.nx(), 0.0);
-        map[start + 1] = columns > grid.nx() / 2 ? rows[from + grid.nx()] : 0;
-        alongX.realInverse(map, start, false);
-    }
-
-    private void forwardRow(double[] map, int row) {
-        System.arraycopy(map, row * grid.nx(), batch, 0, grid.nx());
-        alongX.realForward(batch);
-        int to = row * rowStride;
-        System.arraycopy(batch, 0, rows, to, Math.min(2 * columns, grid.nx()));
-        rows[to + 1] = 0;
-        if (columns > grid.nx() / 2) {
-            rows[to + grid.nx()] = batch[1];
-            rows[to + grid.nx() + 1] = 0;
-        }
+    private int width(int tile) {
+        return Math.min(ColumnTiles.WIDTH, columns - tile * ColumnTiles.WIDTH);
     }
 
     private void requireLengths(double[] map, double[] modes) {

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import manyskies.field.GradientCurl;
 import manyskies.field.Modes;
@@ -110,7 +111,7 @@ class FlatTransformTest {
             minusQ[pixel] = -Math.cos(grid.lx(2) * (pixel % 16) * PIXEL);
         }
         assertSame(map.re(), minusQ);
-        assertThat(map.im()).containsOnly(0.0, -0.0);
+        assertThat(Arrays.stream(map.im()).map(Math::abs).max()).hasValue(0);
     }
 
     /**
