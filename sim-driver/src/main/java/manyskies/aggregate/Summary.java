@@ -2,6 +2,8 @@ package manyskies.aggregate;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 
 /**
@@ -69,20 +71,24 @@ public record Summary(
                                 + " realisations are there; the tables use those");
             }
         }
-        for (EstimatorSummary e : estimators) {
-            if (!e.meanFieldRemoved()) {
-                notes.add(
-                        e.estimator()
-                                + ": no mean_field, which needs field sums of at least one block of"
-                                + " even and one of odd number; debiased still holds it");
-            }
-            if (e.debiasedWith().equals(java.util.Optional.of("n0_analytic"))) {
-                notes.add(
-                        e.estimator()
-                                + ": debiased with n0_analytic, as there are no pairs of skies for"
-                                + " n0_mc");
-            }
-        }
+        addNote(
+                notes,
+                estimators.stream().filter(e -> !e.meanFieldRemoved()),
+                "no mean_field, which needs field sums of at least one block of even and one of"
+                        + " odd number; debiased still holds it");
+        addNote(
+                notes,
+                estimators.stream()
+                        .filter(e -> e.debiasedWith().equals(Optional.of("n0_analytic"))),
+                "debiased with n0_analytic, as there are no pairs of skies for n0_mc");
         return notes;
+    }
+
+    private static void addNote(
+            List<String> notes, Stream<EstimatorSummary> concerned, String sentence) {
+        String names = concerned.map(EstimatorSummary::estimator).collect(Collectors.joining(", "));
+        if (!names.isEmpty()) {
+            notes.add(names + ": " + sentence);
+        }
     }
 }

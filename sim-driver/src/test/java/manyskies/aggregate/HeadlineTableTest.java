@@ -29,7 +29,7 @@ class HeadlineTableTest {
         String text = HeadlineTable.render(SyntheticRun.of(9, 5, 5).tables().summary());
         assertThat(text.lines().filter(line -> line.startsWith("eb ")).findFirst().orElseThrow())
                 .matches("eb +\\S+ \\+- \\S+ +- +- +needs 6 +needs 6 +\\S+ \\+- \\S+ +\\S+");
-        assertThat(text).contains("note: eb: no mean_field");
+        assertThat(text).contains("note: tt, eb: no mean_field");
     }
 
     /** N0 has no column for its verdict: a star marks a belief that is 40 per cent off. */

@@ -140,7 +140,7 @@ class VerdictTest {
         assertThat(summary.verdicts()).isZero();
         assertThat(summary.notes())
                 .contains(
-                        "tt: no mean_field, which needs field sums of at least one block of even"
+                        "tt, eb: no mean_field, which needs field sums of at least one block of even"
                                 + " and one of odd number; debiased still holds it");
         assertThat(SyntheticRun.of(3, 6, 6).tables().summary().verdicts()).isEqualTo(6);
     }
@@ -154,7 +154,7 @@ class VerdictTest {
         assertThat(tt.n0().reason()).isEqualTo("set pairs has 0 realisations");
         assertThat(tables.summary().notes())
                 .contains(
-                        "tt: debiased with n0_analytic, as there are no pairs of skies for n0_mc");
+                        "tt, eb: debiased with n0_analytic, as there are no pairs of skies for n0_mc");
         double expected =
                 AggregationTest.row(tables, "tt", "auto", 0).value()
                         - 1
