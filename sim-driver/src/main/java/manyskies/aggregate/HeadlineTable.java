@@ -26,6 +26,8 @@ public final class HeadlineTable {
     /** However small an error is. */
     private static final int MOST_DECIMALS = 5;
 
+    private static final int COLUMNS = 100;
+
     private HeadlineTable() {}
 
     /** The table with a line about its counts above and a line on how to read it below. */
@@ -35,7 +37,7 @@ public final class HeadlineTable {
         summary.estimators().forEach(e -> lines.add(cells(e, summary.threshold())));
         StringBuilder text = new StringBuilder(counts(summary));
         lines.forEach(line -> append(text, line, widths(lines)));
-        summary.notes().forEach(note -> text.append("note: ").append(note).append('\n'));
+        summary.notes().forEach(note -> text.append(wrapped("note: " + note)));
         return text.append(legend(summary)).toString();
     }
 
@@ -91,6 +93,14 @@ public final class HeadlineTable {
 
     private static String format(int decimals, double value) {
         return String.format(Locale.ROOT, "%." + decimals + "f", value);
+    }
+
+    /** Lines of at most {@link #COLUMNS} letters, broken between words. */
+    private static String wrapped(String sentence) {
+        int end = sentence.length() <= COLUMNS ? -1 : sentence.lastIndexOf(' ', COLUMNS);
+        return end < 2 // nothing but the indent before it
+                ? sentence + "\n"
+                : sentence.substring(0, end) + "\n" + wrapped("  " + sentence.substring(end + 1));
     }
 
     private static int[] widths(List<List<String>> lines) {

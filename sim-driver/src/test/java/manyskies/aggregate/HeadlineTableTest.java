@@ -30,6 +30,8 @@ class HeadlineTableTest {
         assertThat(text.lines().filter(line -> line.startsWith("eb ")).findFirst().orElseThrow())
                 .matches("eb +\\S+ \\+- \\S+ +- +- +needs 6 +needs 6 +\\S+ \\+- \\S+ +\\S+");
         assertThat(text).contains("note: tt, eb: no mean_field");
+        assertThat(text.lines()).allMatch(line -> line.length() <= 100);
+        assertThat(text).contains("and one of odd\n  number; debiased still holds it\n");
     }
 
     /** N0 has no column for its verdict: a star marks a belief that is 40 per cent off. */
