@@ -81,7 +81,10 @@ final class AnalysisReader {
                     "lmin must be below lmax, but they are "
                             + Decimal.text(lmin)
                             + " and "
-                            + Decimal.text(lmax));
+                            + Decimal.text(lmax)
+                            + (range.has("lmax")
+                                    ? ""
+                                    : ", the default with these pixels and spectra"));
         }
         requireResolved(range, lmax);
         if (lmax > tableLmax) {
@@ -94,22 +97,27 @@ final class AnalysisReader {
     }
 
     private void requireResolved(Section range, double lmax) {
-        if (lmax > PART_OF_NYQUIST * shape.nyquist()) {
+        if (lmax > resolved()) {
             double largestPixel = Math.toDegrees(PART_OF_NYQUIST * Math.PI / lmax) * 60;
             range.fault(
                     "lmax",
                     Decimal.text(lmax),
                     "it must be at most 0.75 of the patch's Nyquist multipole, "
-                            + Decimal.text(Math.floor(PART_OF_NYQUIST * shape.nyquist()))
+                            + Decimal.text(Math.floor(resolved()))
                             + "; for this lmax pixels have at most "
-                            + Rounded.text(downTo(0.001, largestPixel))
+                            + Rounded.text(downTo(0.001, largestPixel * (1 + 1e-12)))
                             + " arcmin");
         }
     }
 
+    /** The largest l that the pixels resolve; the margin lets round numbers be what they are. */
+    private double resolved() {
+        return PART_OF_NYQUIST * shape.nyquist() * (1 + 1e-12);
+    }
+
     /** 3000, or as many whole hundreds as the pixels and the spectra allow. */
     private double defaultLmax() {
-        double allowed = PART_OF_NYQUIST * shape.nyquist();
+        double allowed = resolved();
         double known = Double.isNaN(tableLmax) ? allowed : Math.min(allowed, tableLmax);
         return known < 100 ? Math.floor(known) : Math.min(DEFAULT_LMAX, downTo(100, known));
     }

@@ -86,7 +86,7 @@ public final class SpecificationReader {
         String name = name(top);
         long seed = seed(top);
         top.require("spectra", "spectra: spectra/fiducial_unlensed.txt");
-        String spectraFile = top.text("spectra", "it is the path of a table").orElse("");
+        String spectraFile = top.text("spectra", "it must be the path of a table").orElse("");
         Optional<Spectra> spectra = spectraFile.isEmpty() ? Optional.empty() : spectra(top);
         PatchReader.Shape shape = PatchReader.read(top.section("patch", PatchReader.KEYS));
         Survey survey = SurveyReader.read(top.section("survey", SurveyReader.KEYS), shape);

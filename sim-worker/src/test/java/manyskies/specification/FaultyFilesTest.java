@@ -296,7 +296,7 @@ class FaultyFilesTest {
                         "{lmin: 100, lmax: 3000}",
                         "{lmin: 3000}",
                         17,
-                        "analysis.temperature.lmin is 3000; lmin must be below lmax, but they are 3000 and 3000."),
+                        "analysis.temperature.lmin is 3000; lmin must be below lmax, but they are 3000 and 3000, the default with these pixels and spectra."),
                 edit(
                         "{lmin: 100, lmax: 3000}",
                         "{lmin: 1, lmax: 3000}",
