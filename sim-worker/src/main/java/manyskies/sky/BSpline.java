@@ -19,7 +19,7 @@ package manyskies.sky;
  */
 final class BSpline {
     /** Images beyond this one are taken at delta = 0; they are below 1e-7 of the response. */
-    private static final int IMAGES = 30;
+    private static final int IMAGES = 100;
 
     private BSpline() {}
 
