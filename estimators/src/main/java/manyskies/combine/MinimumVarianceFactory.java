@@ -47,7 +47,7 @@ public final class MinimumVarianceFactory implements EstimatorFactory {
 
     @Override
     public Estimator prepare(Belief belief) {
-        AnalyticResponse analytic = new AnalyticResponse(belief.transform());
+        AnalyticResponse analytic = AnalyticResponse.of(belief);
         List<Estimator> estimators = new ArrayList<>();
         List<BilinearWeight> weights = new ArrayList<>();
         List<LensAndCurl> responses = new ArrayList<>();

@@ -3,6 +3,7 @@ package manyskies.estimator;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.Map;
+import java.util.function.Function;
 import manyskies.field.CmbModes;
 import manyskies.field.SkyField;
 import manyskies.field.SkyTransform;
@@ -25,6 +26,7 @@ public final class Belief {
     private final EnumMap<SkyField, LegField> filtered = new EnumMap<>(SkyField.class);
     private final EnumMap<SkyField, LegField> jointlyFiltered = new EnumMap<>(SkyField.class);
     private final Map<String, LegField> weighted = new HashMap<>();
+    private final Map<Class<?>, Object> shared = new HashMap<>();
 
     /**
      * A belief.
@@ -111,6 +113,11 @@ public final class Belief {
     /** X_bar: a field of the joint filter. */
     public LegField jointlyFiltered(SkyField x) {
         return jointlyFiltered.get(x);
+    }
+
+    /** An object that all estimators of this belief share, made when first asked for. */
+    public <S> S shared(Class<S> type, Function<Belief, S> make) {
+        return type.cast(shared.computeIfAbsent(type, key -> make.apply(this)));
     }
 
     /** Maps of a sky, to be shared by all estimators of this belief. */

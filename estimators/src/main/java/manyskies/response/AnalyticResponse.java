@@ -1,9 +1,13 @@
 package manyskies.response;
 
-import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import manyskies.estimator.Belief;
 import manyskies.estimator.BilinearWeight;
 import manyskies.estimator.LegField;
+import manyskies.estimator.SeparableTerm;
 import manyskies.field.SkyField;
 import manyskies.field.SkyTransform;
 import manyskies.spectrum.ModeSpectra;
@@ -25,6 +29,10 @@ import manyskies.spectrum.ModeSpectra;
  */
 public final class AnalyticResponse {
     private final SkyTransform transform;
+    private final Map<Key, LensAndCurl> made = new HashMap<>();
+
+    /** An integral: of the noise of two lists of terms, or of the response of one. */
+    private record Key(List<SeparableTerm> a, List<SeparableTerm> b, ModeSpectra c) {}
 
     /** How lensing turns one field into another: the source, the result and the angle. */
     private record Channel(SkyField from, SkyField to, Angle angle) {}
@@ -37,9 +45,16 @@ public final class AnalyticResponse {
                     new Channel(SkyField.E, SkyField.B, Angle.SIN),
                     new Channel(SkyField.B, SkyField.E, Angle.MINUS_SIN));
 
-    /** Responses by means of the given transform. */
-    public AnalyticResponse(SkyTransform transform) {
+    private AnalyticResponse(SkyTransform transform) {
         this.transform = transform;
+    }
+
+    /**
+     * The responses of a belief's estimators, shared by all of them: what has been computed once
+     * for some terms is not computed again.
+     */
+    public static AnalyticResponse of(Belief belief) {
+        return belief.shared(AnalyticResponse.class, b -> new AnalyticResponse(b.transform()));
     }
 
     /**
@@ -51,15 +66,23 @@ public final class AnalyticResponse {
     public LensAndCurl response(BilinearWeight weight, ModeSpectra c) {
         Sum sum = new Sum();
         for (BilinearWeight.Part part : weight.parts()) {
-            Convolution convolution = new Convolution(transform);
-            for (ElementaryTerm term : ElementaryTerm.of(part.terms())) {
-                for (Channel channel : LENSING) {
-                    addResponse(convolution, term, channel, c);
-                }
-            }
-            sum.add(convolution.result(), part, ONE);
+            sum.add(
+                    made.computeIfAbsent(
+                            new Key(part.terms(), List.of(), c), key -> response(part.terms(), c)),
+                    part,
+                    ONE);
         }
         return sum.total();
+    }
+
+    private LensAndCurl response(List<SeparableTerm> terms, ModeSpectra c) {
+        Convolution convolution = new Convolution(transform);
+        for (ElementaryTerm term : ElementaryTerm.of(terms)) {
+            for (Channel channel : LENSING) {
+                addResponse(convolution, term, channel, c);
+            }
+        }
+        return convolution.result();
     }
 
     /**
@@ -82,7 +105,7 @@ public final class AnalyticResponse {
 
     private LegField unit(SkyField field) {
         double[] one = new double[transform.space().size()];
-        java.util.Arrays.fill(one, 1);
+        Arrays.fill(one, 1);
         return LegField.of(field, one);
     }
 
@@ -97,16 +120,24 @@ public final class AnalyticResponse {
         Sum sum = new Sum();
         for (BilinearWeight.Part partA : a.parts()) {
             for (BilinearWeight.Part partB : b.parts()) {
-                sum.add(noise(partA, partB, c), partA, partB);
+                sum.add(noise(partA.terms(), partB.terms(), c), partA, partB);
             }
         }
         return sum.total();
     }
 
-    private LensAndCurl noise(BilinearWeight.Part a, BilinearWeight.Part b, ModeSpectra c) {
+    private LensAndCurl noise(List<SeparableTerm> a, List<SeparableTerm> b, ModeSpectra c) {
+        LensAndCurl exchanged = made.get(new Key(b, a, c)); // the same number
+        return exchanged != null
+                ? exchanged
+                : made.computeIfAbsent(new Key(a, b, c), key -> integrateNoise(a, b, c));
+    }
+
+    private LensAndCurl integrateNoise(
+            List<SeparableTerm> a, List<SeparableTerm> b, ModeSpectra c) {
         Convolution convolution = new Convolution(transform);
-        for (ElementaryTerm s : ElementaryTerm.of(a.terms())) {
-            for (ElementaryTerm t : ElementaryTerm.of(b.terms())) {
+        for (ElementaryTerm s : ElementaryTerm.of(a)) {
+            for (ElementaryTerm t : ElementaryTerm.of(b)) {
                 convolution.addDirect(
                         s.gradient().covariance(t.gradient(), c),
                         s.plain().covariance(t.plain(), c),
@@ -123,7 +154,7 @@ public final class AnalyticResponse {
     }
 
     private static final BilinearWeight.Part ONE =
-            new BilinearWeight.Part(new double[0], new double[0], new ArrayList<>());
+            new BilinearWeight.Part(new double[0], new double[0], List.of());
 
     /** Adds up parts under their factors. */
     private final class Sum {

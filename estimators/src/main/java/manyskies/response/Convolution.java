@@ -1,6 +1,5 @@
 package manyskies.response;
 
-import java.util.Arrays;
 import java.util.function.DoubleUnaryOperator;
 import manyskies.field.GradientCurl;
 import manyskies.field.Modes;
@@ -42,14 +41,14 @@ final class Convolution {
         if (f == null || g == null || !a.isEvenWith(b)) {
             return;
         }
-        double[] fSquared = timesSlope(f, s -> s * s);
+        Kernels first = kernels(f, slope -> slope * slope);
+        Kernels second = kernels(g, slope -> 1);
         for (int n = 0; n <= HIGHEST_HARMONIC; n += 2) {
-            double c = 0.5 * a.coefficient(b, n);
+            double c = a.coefficient(b, n);
             if (c != 0) {
-                addAligned(c, n, fSquared, g);
-                addAligned(c, -n, fSquared, g);
-                addTwisted(c, 2 + n, fSquared, -n, g);
-                addTwisted(c, 2 - n, fSquared, n, g);
+                addAligned(c, first.of(n), second.of(-n));
+                addTwisted(0.5 * c, first.of(2 + n), second.of(-n));
+                addTwisted(0.5 * c, first.of(2 - n), second.of(n));
             }
         }
     }
@@ -59,52 +58,40 @@ final class Convolution {
         if (f == null || g == null || !a.isEvenWith(b)) {
             return;
         }
-        double[] fSloped = timesSlope(f, s -> s);
-        double[] gSloped = timesSlope(g, s -> s);
+        Kernels first = kernels(f, slope -> slope);
+        Kernels second = kernels(g, slope -> slope);
         for (int n = 0; n <= HIGHEST_HARMONIC; n += 2) {
             double c = 0.5 * a.coefficient(b.exchanged(), n);
             if (c != 0) {
-                addAligned(c, 1 + n, fSloped, gSloped);
-                addAligned(c, 1 - n, fSloped, gSloped);
-                addTwisted(c, 1 + n, fSloped, 1 - n, gSloped);
-                addTwisted(c, 1 - n, fSloped, 1 + n, gSloped);
+                addAligned(c, first.of(1 + n), second.of(-1 - n));
+                addAligned(c, first.of(1 - n), second.of(n - 1));
+                addTwisted(c, first.of(1 + n), second.of(1 - n));
+                addTwisted(c, first.of(1 - n), second.of(1 + n));
             }
         }
     }
 
-    private double[] timesSlope(double[] f, DoubleUnaryOperator ofSlope) {
-        double[] out = new double[f.length];
-        Arrays.setAll(out, mode -> f[mode] * ofSlope.applyAsDouble(transform.slope(0, mode)));
-        return out;
+    private Kernels kernels(double[] f, DoubleUnaryOperator ofSlope) {
+        double[] modes = new double[2 * f.length];
+        for (int mode = 0; mode < f.length; mode++) {
+            modes[2 * mode] = f[mode] * ofSlope.applyAsDouble(transform.slope(0, mode));
+        }
+        return new Kernels(transform, Modes.of(transform.space(), modes));
     }
 
-    /** Adds c F(l1) G(l2) cos(s phi12). */
-    private void addAligned(double c, int spin, double[] f, double[] g) {
-        Kernel first = kernel(spin, f);
-        Kernel second = kernel(-spin, g);
+    /** Adds the sum over l1 of two kernels of opposite spins, whose real part is cos(s phi12). */
+    private void addAligned(double c, Kernel first, Kernel second) {
         for (int pixel = 0; pixel < aligned.length; pixel++) {
             aligned[pixel] += c * first.productRe(second, pixel);
         }
     }
 
-    /** Adds c F(l1) exp(i s1 phi1) G(l2) exp(i s2 phi2), s1 + s2 = 2. */
-    private void addTwisted(double c, int s1, double[] f, int s2, double[] g) {
-        Kernel first = kernel(s1, f);
-        Kernel second = kernel(s2, g);
+    /** Adds the sum over l1 of two kernels whose spins add up to 2. */
+    private void addTwisted(double c, Kernel first, Kernel second) {
         for (int pixel = 0; pixel < twistedRe.length; pixel++) {
             twistedRe[pixel] += c * first.productRe(second, pixel);
             twistedIm[pixel] += c * first.productIm(second, pixel);
         }
-    }
-
-    private Kernel kernel(int spin, double[] f) {
-        double[] modes = new double[2 * f.length];
-        for (int mode = 0; mode < f.length; mode++) {
-            modes[2 * mode] = f[mode];
-        }
-        return Kernel.of(
-                spin,
-                transform.synthesise(Math.abs(spin), Modes.of(transform.space(), modes), null));
     }
 
     /** The sums as they stand. */

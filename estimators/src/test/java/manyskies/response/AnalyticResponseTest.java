@@ -23,7 +23,7 @@ class AnalyticResponseTest {
     private static final List<String> ALL = List.of("tt", "te", "tb", "ee", "eb", "mv", "joint");
 
     private final Belief belief = SmallSky.belief();
-    private final AnalyticResponse analytic = new AnalyticResponse(belief.transform());
+    private final AnalyticResponse analytic = AnalyticResponse.of(belief);
     private final DirectSums direct =
             new DirectSums(GRID, belief.weights(), belief.total(), SmallSky.LMAX);
 
