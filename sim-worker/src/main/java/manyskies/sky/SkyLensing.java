@@ -17,6 +17,19 @@ import manyskies.spectrum.Spectrum;
  * taken in the same pass, so that one sky costs five inverse transforms. Flat sky: the polarisation
  * basis is not rotated along the deflection.
  *
+ * <p>Measured against a grid refined by two with degree 7 (2 arcmin pixels, 512 x 512, one sky,
+ * bands of 100): the largest error of the power to l = 3000, in per cent, and the rms error of the
+ * modes of E in the last band; with the interpolating prefilter in brackets.
+ *
+ * <pre>
+ *   degree   TT           EE           BB           E modes
+ *   3        0.07 (2.7)   0.03 (2.8)   0.17 (1.0)   1.2  (2.0)
+ *   5        0.01 (0.28)  0.003 (0.30) 0.03 (0.11)  0.21 (0.28)
+ *   7        0.003 (0.04) 0.001 (0.04) 0.01 (0.02)  0.07 (0.07)
+ * </pre>
+ *
+ * Degree 3 keeps 0.1 per cent of TT and EE and 0.3 of BB, and is the fastest by a factor of 1.8.
+ *
  * <p>Holds scratch memory: one thread at a time. Results depend on the arguments alone.
  */
 public final class SkyLensing {

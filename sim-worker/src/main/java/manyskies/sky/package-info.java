@@ -8,7 +8,7 @@
  * <p><b>Flow</b>: {@link manyskies.sky.GaussianSky} draws modes with the Cholesky factor of the
  * spectra; {@link manyskies.sky.SkyLensing} divides them by the spline's mean response, transforms
  * T, Q, U and the two displacements (5 inverse transforms), and evaluates the splines at the
- * displaced points; {@link manyskies.sky.PolarisedTransform} leads back to T, E, B (3 transforms).
+ * displaced points; {@link manyskies.flat.StokesTransform} leads back to T, E, B (3 transforms).
  *
  * <p><b>Uses</b> random and the estimators' field, flat, spectrum. No files, clocks or threads.
  */

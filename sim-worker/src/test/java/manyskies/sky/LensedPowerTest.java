@@ -113,8 +113,25 @@ class LensedPowerTest {
             double beyond = Math.max(0, Math.abs(off) - tolerance) / error;
             worst = Math.min(worst, student(beyond, SKIES - 1));
         }
-        System.out.println(line);
+        System.out.println(line.append("; l > 1000: ").append(overall(s, target)));
         return worst;
+    }
+
+    /** Mean over the bands above l = 1000, in per cent, and its error; bands share their lenses. */
+    private static String overall(int s, double[] target) {
+        double sum = 0;
+        double squares = 0;
+        for (int index = 0; index < SKIES; index++) {
+            double off = 0;
+            for (int band = 9; band < BANDS; band++) {
+                off += 100 * (samples[s][band][index] / target[band] - 1) / (BANDS - 9);
+            }
+            sum += off;
+            squares += off * off;
+        }
+        double mean = sum / SKIES;
+        double error = Math.sqrt((squares / SKIES - mean * mean) / (SKIES - 1));
+        return String.format(Locale.ROOT, "%.2f(%.2f)", mean, error);
     }
 
     private static IntToDoubleFunction at(int s, int band) {
