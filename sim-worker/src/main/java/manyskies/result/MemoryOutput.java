@@ -8,8 +8,9 @@ import org.apache.parquet.io.PositionOutputStream;
 final class MemoryOutput implements OutputFile {
     private final ByteArrayOutputStream bytes = new ByteArrayOutputStream();
 
+    /** The finished file. */
     byte[] bytes() {
-        return bytes.toByteArray();
+        return CanonicalFooter.of(bytes.toByteArray());
     }
 
     @Override
