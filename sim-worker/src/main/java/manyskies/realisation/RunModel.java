@@ -160,7 +160,7 @@ public final class RunModel {
     }
 
     /** The largest multipole of T, E and B that is used. */
-    double lmax() {
+    public double lmax() {
         Analysis analysis = specification.analysis();
         return Math.max(analysis.temperature().lmax(), analysis.polarisation().lmax());
     }
