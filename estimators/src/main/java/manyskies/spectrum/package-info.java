@@ -5,7 +5,7 @@
  * unlensed, lensed and lensed-gradient; bandpowers of modes.
  *
  * <p><b>Flow</b>: a reader turns lines into Spectra (the caller opens the file); LensedSpectra and
- * GradientSpectra turn unlensed Spectra into lensed ones by correlation functions; Bandpowers
+ * LensedGradientSpectra turn unlensed Spectra into lensed ones by correlation functions; Bandpowers
  * averages mode products over annuli.
  *
  * <p><b>Uses</b> field. C_l everywhere, never D_l; uK^2, uK, dimensionless.

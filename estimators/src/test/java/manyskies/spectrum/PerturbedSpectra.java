@@ -10,14 +10,21 @@ package manyskies.spectrum;
  * tables are read at |l| - 1/2.
  */
 final class PerturbedSpectra {
-    private static final int ANGLES = 512;
+    private static final int ANGLES = 128; // of the half circle; the other half is the same
 
     private final Spectra unlensed;
     private final boolean gradient;
+    private final int firstLens;
 
     PerturbedSpectra(Spectra unlensed, boolean gradient) {
+        this(unlensed, gradient, 2);
+    }
+
+    /** With lenses below some L left out. */
+    PerturbedSpectra(Spectra unlensed, boolean gradient, int firstLens) {
         this.unlensed = unlensed;
         this.gradient = gradient;
+        this.firstLens = firstLens;
     }
 
     /** Change of TT, TE, EE or BB at a multipole. */
@@ -26,7 +33,7 @@ final class PerturbedSpectra {
         double l = multipole + 0.5;
         double convolved = 0;
         double meanSquare = 0;
-        for (int n = 2; n <= unlensed.lmax(); n++) {
+        for (int n = firstLens; n <= unlensed.lmax(); n++) {
             double lens = n + 0.5;
             double power = unlensed.at(Spectrum.PP, n) * lens / (2 * Math.PI);
             meanSquare += power * lens * lens;
@@ -41,23 +48,24 @@ final class PerturbedSpectra {
     private double ring(Spectrum name, Spectrum source, double l, double lens) {
         double sum = 0;
         for (int i = 0; i < ANGLES; i++) {
-            double angle = 2 * Math.PI * (i + 0.5) / ANGLES;
+            double angle = Math.PI * (i + 0.5) / ANGLES;
             double x = l - lens * Math.cos(angle);
             double y = -lens * Math.sin(angle);
-            double product = x * lens * Math.cos(angle) + y * lens * Math.sin(angle);
-            double spectrum = unlensed.at(source, Math.hypot(x, y) - 0.5);
-            double a = Math.atan2(y, x);
-            sum += product * product * spectrum * rotation(name, a) * (gradient ? x / l : 1);
+            double square = x * x + y * y;
+            double product = l * lens * Math.cos(angle) - lens * lens; // l'.L
+            double spectrum = unlensed.at(source, Math.sqrt(square) - 0.5);
+            double cosine = (x * x - y * y) / square;
+            sum += product * product * spectrum * rotation(name, cosine) * (gradient ? x / l : 1);
         }
         return sum / ANGLES;
     }
 
-    private static double rotation(Spectrum name, double a) {
+    private static double rotation(Spectrum name, double cosine) {
         return switch (name) {
             case TT -> 1;
-            case TE -> Math.cos(2 * a);
-            case EE -> Math.cos(2 * a) * Math.cos(2 * a);
-            default -> Math.sin(2 * a) * Math.sin(2 * a);
+            case TE -> cosine;
+            case EE -> cosine * cosine;
+            default -> 1 - cosine * cosine;
         };
     }
 }
