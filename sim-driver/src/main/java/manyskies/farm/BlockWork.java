@@ -18,8 +18,8 @@ public interface BlockWork extends Serializable {
     /**
      * The finished block.
      *
-     * @throws RealisationException naming the realisation that failed; the farm reports it and goes
-     *     on with other blocks, as it does with any other exception
+     * @throws RuntimeException naming the realisation that failed; the farm reports it and goes on
+     *     with other blocks
      * @throws java.io.UncheckedIOException if the host failed, not the work; the task is tried again
      */
     EncodedBlock run(BlockId id);

@@ -52,7 +52,7 @@ public final class Farm {
             Progress progress,
             StopSwitch stop) {
         if (blocks.isEmpty()) {
-            return new FarmResult(0, List.of(), false);
+            return FarmResult.NOTHING_TO_DO;
         }
         return new Farm(settings, blocks, work, stop).run(blocks.size(), sink, progress);
     }

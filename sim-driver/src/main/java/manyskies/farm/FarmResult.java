@@ -11,6 +11,9 @@ import java.util.List;
  */
 public record FarmResult(int committed, List<BlockFailure> failures, boolean stopped) {
 
+    /** The result of a farm without blocks. */
+    public static final FarmResult NOTHING_TO_DO = new FarmResult(0, List.of(), false);
+
     /** Copies the list. */
     public FarmResult {
         failures = List.copyOf(failures);

@@ -28,7 +28,7 @@ public record FarmSettings(int cores, Optional<String> master) {
     }
 
     /** Spark's master URL; local tasks get three tries, of which only failing I/O makes use. */
-    String masterUrl() {
+    public String masterUrl() {
         return master.orElse("local[" + cores + ",3]");
     }
 

@@ -10,7 +10,7 @@ import java.lang.reflect.Proxy;
  * that hears signals, sun.misc.Signal, is supported but in no standard module: javac warns of its
  * name and allows no suppression, so it is reached by reflection.
  */
-public final class Interrupts implements AutoCloseable {
+public final class Interrupts {
     private static final int ENDED_BY_CTRL_C = 130;
 
     private final Object before;
@@ -19,7 +19,7 @@ public final class Interrupts implements AutoCloseable {
         this.before = before;
     }
 
-    /** Listens until closed. */
+    /** Listens until {@link #close}. */
     public static Interrupts throwing(StopSwitch stop) {
         InvocationHandler onSignal =
                 (proxy, method, arguments) -> {
@@ -63,7 +63,7 @@ public final class Interrupts implements AutoCloseable {
         }
     }
 
-    @Override
+    /** Gives Ctrl-C back to whom it belonged. */
     public void close() {
         handle(before);
     }

@@ -22,8 +22,7 @@ final class StandInWork {
     static BlockWork failingAt(int number, int index) {
         return id -> {
             if (id.number() == number) {
-                throw new RealisationException(
-                        id.set(), index, new IllegalStateException("C_l is -1.0 at l = 812"));
+                throw new IllegalStateException("realisation " + index + " failed");
             }
             return block(id);
         };
