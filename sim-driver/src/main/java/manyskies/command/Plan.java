@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import manyskies.realisation.BlockRunner;
 import manyskies.result.BlockId;
 import manyskies.specification.Sets;
 import manyskies.specification.Specification;
@@ -17,8 +18,8 @@ import manyskies.specification.Specification;
  * realisations are more blocks and no block ever changes.
  */
 final class Plan {
-    static final String DATA = "data";
-    static final String PAIRS = "pairs";
+    static final String DATA = BlockRunner.DATA;
+    static final String PAIRS = BlockRunner.PAIRS;
 
     private final List<BlockId> blocks;
 
