@@ -184,9 +184,10 @@ class ArchitectureTest {
         String owner = target.getOwner().getFullName();
         String name = target.getName();
         boolean now = name.equals("now") && target.getRawParameterTypes().isEmpty();
-        return owner.equals("java.lang.System")
-                        && (name.equals("currentTimeMillis") || name.equals("nanoTime"))
-                || owner.startsWith("java.time.") && (now || name.startsWith("system"));
+        boolean system = name.equals("currentTimeMillis") || name.equals("nanoTime");
+        boolean time = now || name.startsWith("system");
+        return (owner.equals("java.lang.System") && system)
+                || (owner.startsWith("java.time.") && time);
     }
 
     @Test
