@@ -53,7 +53,10 @@ class CheckTablesTest {
     void responsesAndNoiseAreThoseOfDirectQuadrature(String weights) throws IOException {
         Spectra unlensed = unlensed();
         Spectra lensed = LensedSpectra.of(unlensed);
-        Spectra used = weights.equals("grad") ? LensedGradientSpectra.of(unlensed) : lensed;
+        Spectra used =
+                weights.equals("grad")
+                        ? LensedGradientSpectra.of(withoutLargestLenses(unlensed))
+                        : lensed;
         Belief belief = belief(lensed, used);
         AnalyticResponse analytic = AnalyticResponse.of(belief);
         Map<String, double[]> table = table("/check/C_" + weights + "_direct.csv");
@@ -78,6 +81,17 @@ class CheckTablesTest {
                 analytic.noise(weight(belief, "mv"), weight(belief, "mv"), belief.total()).lens();
         compare(table, "N0_MV", mv, faults);
         assertThat(faults).isEmpty();
+    }
+
+    /**
+     * Our gradient spectra hold lenses of all L; the table agrees only with such from L = 24 up (its
+     * lattice of 12.8 degrees has no mode below L = 28). The number was found by fitting, see {@code
+     * ResponseTableTest}; with all lenses TT, TE, EE and TB are lower by up to 6e-3.
+     */
+    private static Spectra withoutLargestLenses(Spectra unlensed) {
+        double[] lenses = unlensed.values(Spectrum.PP);
+        Arrays.fill(lenses, 0, 24, 0);
+        return unlensed.with(Map.of(Spectrum.PP, lenses));
     }
 
     private static BilinearWeight weight(Belief belief, String name) {
