@@ -1,10 +1,11 @@
 package manyskies.flat;
 
-import java.util.Collection;
+import java.lang.management.ManagementFactory;
+import java.lang.management.ThreadMXBean;
+import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.Locale;
 import java.util.Map;
-import java.util.TreeMap;
 import java.util.concurrent.TimeUnit;
 import org.jtransforms.fft.DoubleFFT_2D;
 import org.openjdk.jmh.annotations.Benchmark;
@@ -19,25 +20,21 @@ import org.openjdk.jmh.annotations.Scope;
 import org.openjdk.jmh.annotations.Setup;
 import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
-import org.openjdk.jmh.results.RunResult;
-import org.openjdk.jmh.runner.Runner;
-import org.openjdk.jmh.runner.RunnerException;
-import org.openjdk.jmh.runner.options.OptionsBuilder;
-import org.openjdk.jmh.runner.options.VerboseMode;
 
 /**
  * Time of our transforms in units of one JTransforms {@code DoubleFFT_2D.realForward} of the same
- * size, on one thread. Run from the project's root, about three minutes:
+ * size, on one thread. From the project's root:
  *
  * <pre>
  * mvn -q -B -pl estimators test-compile dependency:build-classpath -Dmdep.outputFile=target/classpath
- * java -cp estimators/target/test-classes:estimators/target/classes:$(cat estimators/target/classpath) \\
- *   manyskies.flat.TransformBenchmark 512 1024 2048
+ * CP=estimators/target/test-classes:estimators/target/classes:$(cat estimators/target/classpath)
+ * java -cp $CP org.openjdk.jmh.Main TransformBenchmark -p n=512,1024,2048   # times, by JMH
+ * java -cp $CP manyskies.flat.TransformBenchmark 512 1024 2048              # ratios, half a minute
  * </pre>
  *
- * Sizes that are no power of two are left out, because the unit does not exist for them. Rounds
- * alternate between the transforms, and the medians of a round are compared with each other, so
- * that a slowly changing load on the machine shows little.
+ * JMH measures one thing after another by the wall clock, so that on a shared machine its ratios
+ * say little. The table of ratios takes the transforms in turn and counts the thread's own time.
+ * Sizes that are no power of two are left out, because the unit does not exist for them.
  */
 @State(Scope.Thread)
 @BenchmarkMode(Mode.SampleTime)
@@ -46,8 +43,6 @@ import org.openjdk.jmh.runner.options.VerboseMode;
 @Measurement(iterations = 4, time = 500, timeUnit = TimeUnit.MILLISECONDS)
 @Fork(value = 1, jvmArgsAppend = "-Xmx1g")
 public class TransformBenchmark {
-    private static final int ROUNDS = 3;
-
     /** What is timed. */
     public enum Kind {
         /** JTransforms' own two-dimensional transform: the unit. */
@@ -115,46 +110,51 @@ public class TransformBenchmark {
      *
      * @param args sizes, powers of two
      */
-    public static void main(String[] args) throws RunnerException {
-        String[] sizes = args.length == 0 ? new String[] {"512", "1024", "2048"} : args;
-        System.out.println(
-                "round  n     ms of one unit, then units: forward inverse, at half band");
-        for (int round = 1; round <= ROUNDS; round++) {
-            Collection<RunResult> results =
-                    new Runner(
-                                    new OptionsBuilder()
-                                            .include(TransformBenchmark.class.getName())
-                                            .param("n", sizes)
-                                            .verbosity(VerboseMode.SILENT)
-                                            .build())
-                            .run();
-            print(round, results);
+    public static void main(String[] args) {
+        System.out.println("units of one JTransforms transform: least (median) of the repetitions");
+        for (String arg : args.length == 0 ? new String[] {"512", "1024", "2048"} : args) {
+            int size = Integer.parseInt(arg);
+            Map<Kind, long[]> times = measure(size, Math.max(25, 60_000_000 / (size * size)));
+            long[] unit = times.get(Kind.UNIT);
+            times.forEach((kind, time) -> print(size, kind, time, unit));
         }
     }
 
-    private static void print(int round, Collection<RunResult> results) {
-        Map<Integer, Map<Kind, Double>> median = new TreeMap<>();
-        for (RunResult result : results) {
-            int size = Integer.parseInt(result.getParams().getParam("n"));
-            median.computeIfAbsent(size, k -> new EnumMap<>(Kind.class))
-                    .put(
-                            Kind.valueOf(result.getParams().getParam("kind")),
-                            result.getPrimaryResult().getStatistics().getPercentile(50));
+    /** Sorted nanoseconds of this thread, one entry per repetition. */
+    private static Map<Kind, long[]> measure(int size, int repetitions) {
+        Map<Kind, TransformBenchmark> benchmarks = new EnumMap<>(Kind.class);
+        Map<Kind, long[]> times = new EnumMap<>(Kind.class);
+        for (Kind kind : Kind.values()) {
+            TransformBenchmark benchmark = new TransformBenchmark();
+            benchmark.n = size;
+            benchmark.kind = kind;
+            benchmark.prepare();
+            benchmarks.put(kind, benchmark);
+            times.put(kind, new long[repetitions]);
         }
-        median.forEach((size, ofKind) -> print(round, size, ofKind));
+        ThreadMXBean clock = ManagementFactory.getThreadMXBean();
+        for (int repetition = 0; repetition < repetitions; repetition++) {
+            for (Kind kind : Kind.values()) {
+                benchmarks.get(kind).refill();
+                long start = clock.getCurrentThreadCpuTime();
+                benchmarks.get(kind).transform();
+                times.get(kind)[repetition] = clock.getCurrentThreadCpuTime() - start;
+            }
+        }
+        times.values().forEach(Arrays::sort);
+        return times;
     }
 
-    private static void print(int round, int size, Map<Kind, Double> ofKind) {
-        double unit = ofKind.get(Kind.UNIT);
+    private static void print(int size, Kind kind, long[] time, long[] unit) {
+        int middle = time.length / 2;
         System.out.printf(
                 Locale.ROOT,
-                "%-6d %-5d %7.2f   %.3f %.3f   %.3f %.3f%n",
-                round,
+                "%5d %-13s %.3f (%.3f)   %.2f (%.2f) ms%n",
                 size,
-                unit,
-                ofKind.get(Kind.FORWARD) / unit,
-                ofKind.get(Kind.INVERSE) / unit,
-                ofKind.get(Kind.FORWARD_HALF) / unit,
-                ofKind.get(Kind.INVERSE_HALF) / unit);
+                kind,
+                (double) time[0] / unit[0],
+                (double) time[middle] / unit[middle],
+                time[0] / 1e6,
+                time[middle] / 1e6);
     }
 }
