@@ -8,6 +8,7 @@ import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.ObjectInputStream;
 import java.io.ObjectOutputStream;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.sql.Connection;
@@ -66,6 +67,22 @@ class BlockCodecTest {
         assertThat(one.fields()).isEqualTo(two.fields());
         assertThat(one.bandpowersHash()).isEqualTo(two.bandpowersHash()).hasSize(64);
         assertThat(TestBlocks.encoded(4).bandpowersHash()).isNotEqualTo(one.bandpowersHash());
+    }
+
+    /** Hash sets of enums, say, are ordered anew in each JVM: another one writes the same bytes. */
+    @Test
+    void equalBlocksAreEqualBytesInAnotherJvm() throws IOException {
+        Process other =
+                new ProcessBuilder(
+                                Path.of(System.getProperty("java.home"), "bin", "java").toString(),
+                                "-cp",
+                                System.getProperty("java.class.path"),
+                                BlockHashes.class.getName())
+                        .redirectError(ProcessBuilder.Redirect.DISCARD)
+                        .start();
+        String found =
+                new String(other.getInputStream().readAllBytes(), StandardCharsets.UTF_8).strip();
+        assertThat(found).isEqualTo(BlockHashes.text());
     }
 
     /** Second method: another reader finds the same bits in the bandpowers. */
