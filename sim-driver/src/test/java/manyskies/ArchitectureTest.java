@@ -54,6 +54,7 @@ class ArchitectureTest {
         map.put("instrument", union(estimators, Set.of("random", "specification")));
         map.put("result", Set.of("specification", "spectrum"));
         map.put("realisation", Set.copyOf(map.keySet()));
+        map.put("picture", Set.of("field", "flat", "result"));
         // notebooks-free-reports: pages, from numbers alone
         map.put("figure", Set.of());
         map.put("report", Set.of("figure", "statistic"));
@@ -121,6 +122,7 @@ class ArchitectureTest {
         "org.snakeyaml.., specification",
         "org.apache.parquet.., result",
         "org.apache.hadoop.., result",
+        "nom.tam.., picture",
         "org.apache.spark.., farm",
         "scala.., farm",
         "picocli.., command",
