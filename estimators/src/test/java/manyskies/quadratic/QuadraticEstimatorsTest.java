@@ -12,7 +12,6 @@ import manyskies.field.CmbModes;
 import manyskies.field.Modes;
 import manyskies.field.SkyField;
 import manyskies.flat.FlatGrid;
-import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
@@ -44,7 +43,7 @@ class QuadraticEstimatorsTest {
         assertSame(found.curl(), (kx, ky) -> direct.estimate(xy, true, x, y, kx, ky));
     }
 
-    static Reconstruction reconstruct(Belief belief, String name, CmbModes a, CmbModes b) {
+    private static Reconstruction reconstruct(Belief belief, String name, CmbModes a, CmbModes b) {
         LegMaps first = belief.maps(a);
         LegMaps second = a.equals(b) ? first : belief.maps(b);
         LegPair pair = belief.pair(first, second);
@@ -72,46 +71,5 @@ class QuadraticEstimatorsTest {
         }
         assertThat(norm).isPositive();
         assertThat(Math.sqrt(error / norm)).isLessThan(1e-12);
-    }
-
-    /** Bilinearity: the estimate of (a + a', b) is that of (a, b) plus that of (a', b). */
-    @ParameterizedTest
-    @ValueSource(strings = {"tt", "te", "tb", "ee", "eb", "mv", "joint"})
-    void everyEstimatorIsLinearInEachLeg(String name) {
-        Belief belief = SmallSky.belief();
-        CmbModes a = SmallSky.legs(1);
-        CmbModes other = SmallSky.legs(2);
-        CmbModes b = SmallSky.legs(3);
-        CmbModes sum =
-                new CmbModes(
-                        a.temperature().combine(1, other.temperature(), 1),
-                        a.gradient().combine(1, other.gradient(), 1),
-                        a.curl().combine(1, other.curl(), 1));
-        for (boolean first : new boolean[] {true, false}) {
-            Modes whole = leg(belief, name, sum, b, first);
-            Modes parts =
-                    leg(belief, name, a, b, first)
-                            .combine(1, leg(belief, name, other, b, first), 1);
-            double error = 0;
-            double norm = 0;
-            for (int i = 0; i < whole.values().length; i++) {
-                error += Math.pow(whole.values()[i] - parts.values()[i], 2);
-                norm += Math.pow(whole.values()[i], 2);
-            }
-            assertThat(Math.sqrt(error / norm)).isLessThan(1e-12);
-        }
-    }
-
-    private static Modes leg(Belief belief, String name, CmbModes a, CmbModes b, boolean first) {
-        return (first ? reconstruct(belief, name, a, b) : reconstruct(belief, name, b, a))
-                .gradient();
-    }
-
-    @Test
-    void anUnknownNameListsWhatThereIs() {
-        org.assertj.core.api.Assertions.assertThatThrownBy(() -> Estimators.named("xx"))
-                .hasMessage(
-                        "no estimator 'xx' is installed;"
-                                + " there are eb, ee, joint, mv, tb, te, tt");
     }
 }

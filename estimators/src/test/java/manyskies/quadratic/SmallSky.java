@@ -1,5 +1,6 @@
 package manyskies.quadratic;
 
+import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.SplittableRandom;
@@ -25,7 +26,11 @@ public final class SmallSky {
     private SmallSky() {}
 
     public static ModeSpectra signal() {
-        return ModeSpectra.sample(table(), GRID);
+        return signal(GRID);
+    }
+
+    private static ModeSpectra signal(FlatGrid grid) {
+        return ModeSpectra.sample(table(), grid);
     }
 
     private static Spectra table() {
@@ -46,16 +51,25 @@ public final class SmallSky {
 
     /** Signal plus white noise. */
     public static ModeSpectra total(double noise) {
-        double[] n = new double[GRID.size()];
-        java.util.Arrays.fill(n, noise);
-        return signal().plus(Map.of(Spectrum.TT, n, Spectrum.EE, n, Spectrum.BB, n));
+        return total(GRID, noise);
+    }
+
+    private static ModeSpectra total(FlatGrid grid, double noise) {
+        double[] n = new double[grid.size()];
+        Arrays.fill(n, noise);
+        return signal(grid).plus(Map.of(Spectrum.TT, n, Spectrum.EE, n, Spectrum.BB, n));
     }
 
     public static Belief belief() {
-        ModeSpectra total = total(0.1);
+        return belief(GRID);
+    }
+
+    /** On another patch; its products are exact if (2 LMAX + LOUT) pixel is below 2 pi. */
+    public static Belief belief(FlatGrid grid) {
+        ModeSpectra total = total(grid, 0.1);
         return new Belief(
-                FlatTransform.of(GRID, 2 * LMAX),
-                signal(),
+                FlatTransform.of(grid, 2 * LMAX),
+                signal(grid),
                 total,
                 InverseVariance.of(total, l -> l <= LMAX, l -> l <= LMAX),
                 LOUT);
@@ -63,24 +77,29 @@ public final class SmallSky {
 
     /** Three unrelated fields with random modes; Hermitian on the self-conjugate column. */
     public static CmbModes legs(long seed) {
-        SplittableRandom random = new SplittableRandom(seed);
-        return new CmbModes(field(random), field(random), field(random));
+        return legs(GRID, seed);
     }
 
-    private static Modes field(SplittableRandom random) {
-        double[] values = new double[2 * GRID.size()];
-        for (int mode = 0; mode < GRID.size(); mode++) {
-            if (!GRID.isNyquist(mode) && GRID.multipole(mode) > 0) {
+    /** The same on another patch. */
+    public static CmbModes legs(FlatGrid grid, long seed) {
+        SplittableRandom random = new SplittableRandom(seed);
+        return new CmbModes(field(grid, random), field(grid, random), field(grid, random));
+    }
+
+    private static Modes field(FlatGrid grid, SplittableRandom random) {
+        double[] values = new double[2 * grid.size()];
+        for (int mode = 0; mode < grid.size(); mode++) {
+            if (!grid.isNyquist(mode) && grid.multipole(mode) > 0) {
                 values[2 * mode] = random.nextDouble(-1, 1);
                 values[2 * mode + 1] = random.nextDouble(-1, 1);
             }
         }
-        for (int ky = 1; ky < GRID.ny() / 2; ky++) {
-            int plus = GRID.mode(0, ky);
-            int minus = GRID.mode(0, -ky);
+        for (int ky = 1; ky < grid.ny() / 2; ky++) {
+            int plus = grid.mode(0, ky);
+            int minus = grid.mode(0, -ky);
             values[2 * minus] = values[2 * plus];
             values[2 * minus + 1] = -values[2 * plus + 1];
         }
-        return Modes.of(GRID, values);
+        return Modes.of(grid, values);
     }
 }
