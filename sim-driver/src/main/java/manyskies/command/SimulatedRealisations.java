@@ -46,7 +46,7 @@ final class SimulatedRealisations implements Realisations {
 
     @Override
     public String stageTimes(Specification specification) {
-        throw missing();
+        return new StageTimes(SimulationWork.model(specification)).table();
     }
 
     private static UnsupportedOperationException missing() {
