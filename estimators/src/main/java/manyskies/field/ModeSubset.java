@@ -60,6 +60,25 @@ public final class ModeSubset implements ModeSpace {
         return Modes.of(this, out);
     }
 
+    /**
+     * A packed field on the whole space again, zero at the modes that were not kept.
+     *
+     * @throws IllegalArgumentException if the field is not one of this subset
+     */
+    public Modes unpack(Modes packed) {
+        if (!packed.space().equals(this)) {
+            throw new IllegalArgumentException(
+                    "modes of " + packed.space() + " are not of " + this);
+        }
+        double[] in = packed.values();
+        double[] out = new double[2 * whole.size()];
+        for (int i = 0; i < modes.length; i++) {
+            out[2 * modes[i]] = in[2 * i];
+            out[2 * modes[i] + 1] = in[2 * i + 1];
+        }
+        return Modes.of(whole, out);
+    }
+
     /** The kept values of a function given per mode of the whole space. */
     public double[] pack(double[] ofMode) {
         double[] out = new double[modes.length];

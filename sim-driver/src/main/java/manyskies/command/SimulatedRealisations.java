@@ -41,15 +41,11 @@ final class SimulatedRealisations implements Realisations {
 
     @Override
     public List<Path> writeMaps(Specification specification, int index, Path folder) {
-        throw missing();
+        return new SkyMaps(SimulationWork.model(specification)).write(index, folder);
     }
 
     @Override
     public String stageTimes(Specification specification) {
         return new StageTimes(SimulationWork.model(specification)).table();
-    }
-
-    private static UnsupportedOperationException missing() {
-        return new UnsupportedOperationException("this command is not there yet");
     }
 }
