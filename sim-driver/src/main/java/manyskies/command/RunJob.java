@@ -46,10 +46,15 @@ final class RunJob {
             if (result.stopped()) {
                 return stopped(plan, folder);
             }
-            out.print(RunTables.make(services.realisations().get(), asked, folder));
+            out.print(headline(asked, folder));
             printEnd(path, result, start);
             return verdictOf(result);
         }
+    }
+
+    private String headline(Specification asked, RunFolder folder) {
+        return RunTables.standing(asked, folder)
+                .orElseGet(() -> RunTables.make(services.realisations().get(), asked, folder));
     }
 
     /** Sets damaged blocks aside, naming them, and lists what is then missing. */

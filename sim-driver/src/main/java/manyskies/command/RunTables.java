@@ -1,16 +1,28 @@
 package manyskies.command;
 
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Locale;
+import java.util.Optional;
 import manyskies.aggregate.Aggregation;
 import manyskies.aggregate.BlockSource;
 import manyskies.aggregate.HeadlineTable;
 import manyskies.aggregate.RunFacts;
 import manyskies.aggregate.Tables;
+import manyskies.result.AtomicFile;
 import manyskies.result.RunFolder;
 import manyskies.specification.Specification;
 import manyskies.specification.SpecificationHash;
 
-/** Makes the tables of a run from its committed blocks. */
+/** Makes the tables of a run from its committed blocks, or finds that they stand already. */
 final class RunTables {
+    private static final String HEADLINE = "tables/headline.txt";
+
+    /** What the tables were made from; written last, so that it vouches for the others. */
+    private static final String MADE_FROM = "tables/made-from.txt";
+
     private RunTables() {}
 
     /** Writes the tables and returns the headline table. */
@@ -23,6 +35,38 @@ final class RunTables {
         BlockSource blocks = folder::blocks;
         Tables tables = new Aggregation(facts, realisations.known(specification)).of(blocks);
         tables.write(folder.path().resolve("tables"));
-        return HeadlineTable.render(tables.summary());
+        String headline = HeadlineTable.render(tables.summary());
+        write(folder, HEADLINE, headline);
+        write(folder, MADE_FROM, origin(specification, folder));
+        return headline;
+    }
+
+    private static void write(RunFolder folder, String name, String text) {
+        AtomicFile.write(folder.path().resolve(name), text.getBytes(StandardCharsets.UTF_8));
+    }
+
+    /** The headline table, if the tables were made from the blocks that are there now. */
+    static Optional<String> standing(Specification specification, RunFolder folder) {
+        return read(folder, MADE_FROM).equals(Optional.of(origin(specification, folder)))
+                ? read(folder, HEADLINE)
+                : Optional.empty();
+    }
+
+    private static Optional<String> read(RunFolder folder, String name) {
+        Path file = folder.path().resolve(name);
+        try {
+            return Files.exists(file) ? Optional.of(Files.readString(file)) : Optional.empty();
+        } catch (IOException e) { // then they are made again, and the writing says what is wrong
+            return Optional.empty();
+        }
+    }
+
+    private static String origin(Specification specification, RunFolder folder) {
+        return String.format(
+                Locale.ROOT,
+                "program %s\nspecification %s\nblocks %s\n",
+                ManyskiesCommand.Version.number(),
+                SpecificationHash.of(specification),
+                folder.fingerprint());
     }
 }

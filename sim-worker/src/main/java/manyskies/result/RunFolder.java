@@ -173,6 +173,13 @@ public final class RunFolder implements AutoCloseable {
         }
     }
 
+    /** SHA-256 over the checksums of all committed blocks in order: another with any other block. */
+    public String fingerprint() {
+        StringBuilder seals = new StringBuilder();
+        committed().forEach(id -> seals.append(store.sealOf(id.stem()).text()));
+        return Sha256.of(seals.toString().getBytes(StandardCharsets.UTF_8));
+    }
+
     /** Reads all of every block and reports those that are not what was committed. */
     public List<DamagedBlockException> damaged() {
         List<DamagedBlockException> damaged = new ArrayList<>();
