@@ -44,12 +44,20 @@ public final class ModeSubset implements ModeSpace {
      * The kept modes of a field, each times a factor of its own.
      *
      * @param factor one per kept mode
-     * @throws IllegalArgumentException if the field lives in another space than this is a part of
+     * @throws IllegalArgumentException if the field lives in another space than this is a part of,
+     *     or there is not one factor per kept mode
      */
     public Modes pack(Modes field, double[] factor) {
         if (!field.space().equals(whole)) {
             throw new IllegalArgumentException(
                     "modes of " + field.space() + " are no modes of " + whole);
+        }
+        if (factor.length != modes.length) {
+            throw new IllegalArgumentException(
+                    "expected "
+                            + modes.length
+                            + " factors, one per kept mode, found "
+                            + factor.length);
         }
         double[] in = field.values();
         double[] out = new double[2 * modes.length];
@@ -79,8 +87,19 @@ public final class ModeSubset implements ModeSpace {
         return Modes.of(whole, out);
     }
 
-    /** The kept values of a function given per mode of the whole space. */
+    /**
+     * The kept values of a function given per mode of the whole space.
+     *
+     * @throws IllegalArgumentException if there is not one value per mode of the whole space
+     */
     public double[] pack(double[] ofMode) {
+        if (ofMode.length != whole.size()) {
+            throw new IllegalArgumentException(
+                    "expected "
+                            + whole.size()
+                            + " numbers, one per mode of the whole space, found "
+                            + ofMode.length);
+        }
         double[] out = new double[modes.length];
         Arrays.setAll(out, i -> ofMode[modes[i]]);
         return out;

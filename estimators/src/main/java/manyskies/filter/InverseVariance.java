@@ -31,7 +31,7 @@ public final class InverseVariance {
         jointTe = new double[total.space().size()];
         double[] te = total.of(Spectrum.TE);
         for (int mode = 0; mode < jointTe.length; mode++) {
-            invertTogether(mode, te[mode]);
+            invertTogether(mode, te[mode], total.space().multipole(mode));
         }
     }
 
@@ -69,7 +69,7 @@ public final class InverseVariance {
         return out;
     }
 
-    private void invertTogether(int mode, double te) {
+    private void invertTogether(int mode, double te, double l) {
         double inverseTt = jointTt[mode];
         double inverseEe = jointEe[mode];
         if (inverseTt == 0 || inverseEe == 0) {
@@ -81,7 +81,10 @@ public final class InverseVariance {
                     "total C_l^TE = "
                             + te
                             + " exceeds sqrt(TT EE) = "
-                            + 1 / Math.sqrt(inverseTt * inverseEe));
+                            + 1 / Math.sqrt(inverseTt * inverseEe)
+                            + " at l = "
+                            + l
+                            + "; check the columns of the spectra");
         }
         jointTt[mode] = inverseTt / decorrelation;
         jointEe[mode] = inverseEe / decorrelation;

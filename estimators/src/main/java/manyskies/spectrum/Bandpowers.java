@@ -72,6 +72,10 @@ public final class Bandpowers {
      */
     public double[] average(Modes x, Modes y) {
         x.requireSameSpace(y);
+        if (x.space() != space && !x.space().equals(space)) {
+            throw new IllegalArgumentException(
+                    "bandpowers of " + space + " cannot be taken of modes of " + x.space());
+        }
         double[] power = new double[modesInBand.length];
         for (int i = 0; i < modes.length; i++) { // this order fixes the last bits
             power[bandOf[i]] += weight[i] * x.realProduct(y, modes[i]);
@@ -82,8 +86,19 @@ public final class Bandpowers {
         return power;
     }
 
-    /** The mean over each band of a function given per mode. */
+    /**
+     * The mean over each band of a function given per mode.
+     *
+     * @throws IllegalArgumentException if there is not one value per mode
+     */
     public double[] mean(double[] ofMode) {
+        if (ofMode.length != space.size()) {
+            throw new IllegalArgumentException(
+                    "expected "
+                            + space.size()
+                            + " numbers, one per mode of the space, found "
+                            + ofMode.length);
+        }
         double[] sum = new double[modesInBand.length];
         for (int i = 0; i < modes.length; i++) {
             sum[bandOf[i]] += weight[i] * ofMode[modes[i]];
