@@ -11,6 +11,7 @@ import java.util.OptionalInt;
 import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 
 /**
  * The head of a table of spectra: which column holds what, and whether it is C_l or D_l.
@@ -160,10 +161,14 @@ final class TableHeader {
                             + line
                             + ": no column is named "
                             + name
-                            + "; this table needs l and "
-                            + required
+                            + "; this table needs l, "
+                            + names(required)
                             + "; add it or correct the header.");
         }
+    }
+
+    private static String names(Set<Spectrum> spectra) {
+        return spectra.stream().map(Spectrum::name).collect(Collectors.joining(", "));
     }
 
     private static boolean startsWithNumber(String text) {

@@ -79,7 +79,9 @@ final class TableRows {
         }
         if (header.multipole().isPresent()) {
             checkMultipole(line, fields[header.multipole().getAsInt()], first);
-            header.columns().forEach((name, column) -> checkSign(line, name, fields[column]));
+            if (text.length == header.width()) { // else no column is sure to be its own
+                header.columns().forEach((name, column) -> checkSign(line, name, fields[column]));
+            }
             if (faults.size() == before) {
                 rows.add(new Row(line, (int) previous, fields));
             }

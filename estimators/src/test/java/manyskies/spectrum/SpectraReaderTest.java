@@ -56,7 +56,7 @@ class SpectraReaderTest {
                         "line 2: no column is named l; name the multipole's column l."),
                 fault(
                         header("# l TT EE TE BB TP EP"),
-                        "line 2: no column is named PP; this table needs l and [TT, EE, TE, PP];"
+                        "line 2: no column is named PP; this table needs l, TT, EE, TE, PP;"
                                 + " add it or correct the header."),
                 fault(
                         header("# l TT EE TE PP TP XE"),

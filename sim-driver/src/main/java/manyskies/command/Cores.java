@@ -31,8 +31,9 @@ final class Cores {
         int all = Runtime.getRuntime().availableProcessors();
         int wanted = cores.orElse(all);
         if (wanted < 1) {
-            throw new InputException("--cores is " + wanted + "; at least one core is needed");
+            throw new InputException("--cores is " + wanted + "; at least one core is needed.");
         }
+        master.ifPresent(Cores::requireMaster);
         FarmSettings settings = new FarmSettings(wanted, master);
         if (!settings.isLocal()) {
             return settings; // the executors' memory is the cluster's business
@@ -51,5 +52,15 @@ final class Cores {
                         + Heap.text(heap.bytes())
                         + ", set by MANYSKIES_HEAP).");
         return FarmSettings.local(heap.tasks());
+    }
+
+    private static void requireMaster(String url) {
+        if (!url.matches("(spark|k8s)://.+|yarn|local.*")) {
+            throw new InputException(
+                    "--master is '"
+                            + url
+                            + "'; write the URL of a Spark master, for example"
+                            + " spark://host:7077, or leave it out.");
+        }
     }
 }

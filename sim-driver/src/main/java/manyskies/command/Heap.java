@@ -16,10 +16,16 @@ record Heap(long bytes, Memory memory) {
     /** For Spark, results on their way to the disk, and the collector's elbow room. */
     static final long RESERVE = 256L << 20;
 
+    /** Spark does not start in less (its own figure: 1.5 times 300 MiB). */
+    static final long LEAST = 450L << 20;
+
     private static final double MEBIBYTE = 1 << 20;
 
     /** Blocks that fit at a time; 0 if not even one does. */
     int tasks() {
+        if (bytes < LEAST) {
+            return 0;
+        }
         long free = bytes - RESERVE - memory.shared();
         return (int) Math.max(0, Math.min(Integer.MAX_VALUE, free / Math.max(1, memory.perTask())));
     }
@@ -40,20 +46,29 @@ record Heap(long bytes, Memory memory) {
         throw new EnvironmentException(
                 String.format(
                         Locale.ROOT,
-                        "%d cores need %s of heap (%s for each block in progress, %s shared, %s to"
-                                + " spare); the heap is %s: %s%dm.",
-                        cores,
+                        "%s %s of heap (%s for each block in progress, %s shared, %s to"
+                                + " spare, and never less than %s); the heap is %s: %s%dm.",
+                        cores == 1 ? "1 core needs" : cores + " cores need",
                         text(need(cores)),
                         text(memory.perTask()),
                         text(memory.shared()),
                         text(RESERVE),
+                        text(LEAST),
                         text(bytes),
                         fits,
-                        (long) Math.ceil(need(cores) / MEBIBYTE)));
+                        (long) Math.ceil(option(need(cores)) / MEBIBYTE)));
     }
 
     long need(int cores) {
-        return RESERVE + memory.total(cores);
+        return Math.max(LEAST, RESERVE + memory.total(cores));
+    }
+
+    /**
+     * The -Xmx for a heap: the parallel collector keeps a ninth of it, one survivor space, out of
+     * what the JVM calls its heap. Measured: 267 of 278, 400 of 450, 911 of 1024, 1821 of 2048 MiB.
+     */
+    private static double option(long heap) {
+        return heap * (9.0 / 8);
     }
 
     static String text(long bytes) {

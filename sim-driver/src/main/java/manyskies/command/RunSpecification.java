@@ -28,6 +28,7 @@ final class RunSpecification {
      * @throws SpecificationException if its specification was damaged
      */
     static Specification read(Path run) throws SpecificationException {
+        requireNoFile(run);
         if (!Files.isDirectory(run)) {
             throw new InputException(run + ": there is no such folder; 'manyskies run' makes one.");
         }
@@ -38,6 +39,12 @@ final class RunSpecification {
         return SpecificationReader.read(run.resolve(FILE), Estimators.installed().keySet());
     }
 
+    private static void requireNoFile(Path run) {
+        if (Files.isRegularFile(run)) {
+            throw new InputException(run + ": this is a file; name the folder of a run.");
+        }
+    }
+
     private static boolean isRun(Path folder) {
         return Files.exists(folder.resolve(FILE));
     }
@@ -45,9 +52,10 @@ final class RunSpecification {
     /**
      * Refuses to mix two runs in one folder; larger counts are the same run, extended.
      *
-     * @throws InputException saying what differs
+     * @throws InputException saying what differs, or that there is a file in the folder's place
      */
     static void requireSameRun(Path run, Specification asked) throws SpecificationException {
+        requireNoFile(run);
         if (!isRun(run)) {
             return;
         }

@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import manyskies.aggregate.Aggregation;
@@ -13,6 +14,7 @@ import manyskies.aggregate.RunFacts;
 import manyskies.aggregate.Tables;
 import manyskies.result.AtomicFile;
 import manyskies.result.RunFolder;
+import manyskies.result.Sha256;
 import manyskies.specification.Specification;
 import manyskies.specification.SpecificationHash;
 
@@ -20,7 +22,18 @@ import manyskies.specification.SpecificationHash;
 final class RunTables {
     private static final String HEADLINE = "tables/headline.txt";
 
-    /** What the tables were made from; written last, so that it vouches for the others. */
+    private static final List<String> VOUCHED_FOR =
+            List.of(
+                    "tables/bandpowers.csv",
+                    "tables/covariance.csv",
+                    "tables/covariance.parquet",
+                    "tables/summary.json",
+                    HEADLINE);
+
+    /**
+     * What the tables were made from, and their checksums; written last, so that it vouches for the
+     * others: a table that is lost or was changed since is made again.
+     */
     private static final String MADE_FROM = "tables/made-from.txt";
 
     private RunTables() {}
@@ -62,11 +75,25 @@ final class RunTables {
     }
 
     private static String origin(Specification specification, RunFolder folder) {
-        return String.format(
-                Locale.ROOT,
-                "program %s\nspecification %s\nblocks %s\n",
-                ManyskiesCommand.Version.number(),
-                SpecificationHash.of(specification),
-                folder.fingerprint());
+        StringBuilder text =
+                new StringBuilder(
+                        String.format(
+                                Locale.ROOT,
+                                "program %s\nspecification %s\nblocks %s\n",
+                                ManyskiesCommand.Version.number(),
+                                SpecificationHash.of(specification),
+                                folder.fingerprint()));
+        for (String name : VOUCHED_FOR) {
+            text.append(checksum(folder, name)).append("  ").append(name).append('\n');
+        }
+        return text.toString();
+    }
+
+    private static String checksum(RunFolder folder, String name) {
+        try {
+            return Sha256.of(Files.readAllBytes(folder.path().resolve(name)));
+        } catch (IOException e) {
+            return "missing";
+        }
     }
 }

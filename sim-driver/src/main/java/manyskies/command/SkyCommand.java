@@ -46,7 +46,7 @@ final class SkyCommand implements Callable<Integer> {
     public Integer call() throws Exception {
         Specification specification = SpecificationFile.read(services, specificationFile);
         if (index < 0) {
-            throw new InputException("--index is " + index + "; indices begin at 0");
+            throw new InputException("--index is " + index + "; indices begin at 0.");
         }
         Path folder = to.orElse(Path.of("skies", specification.name() + "-" + index));
         PrintWriter out = spec.commandLine().getOut();

@@ -2,9 +2,12 @@ package manyskies.farm;
 
 import java.lang.reflect.InvocationHandler;
 import java.lang.reflect.Proxy;
+import java.util.LinkedHashMap;
+import java.util.Map;
 
 /**
- * Ctrl-C while the farm works: the first throws the switch, the second ends the program at once.
+ * Ctrl-C while the farm works: the first throws the switch, the second ends the program at once. A
+ * request to terminate (a queue's time limit, a shutdown) and the end of a session are heard alike.
  *
  * <p>A shutdown hook would hear the first only, and the JVM would be going down already. The class
  * that hears signals, sun.misc.Signal, is supported but in no standard module: javac warns of its
@@ -13,11 +16,11 @@ import java.lang.reflect.Proxy;
 public final class Interrupts {
     private static final int ENDED_BY_CTRL_C = 130;
 
-    private final Object before;
+    private static final String[] SIGNALS = {"INT", "TERM", "HUP"};
 
-    private Interrupts(Object before) {
-        this.before = before;
-    }
+    private final Map<String, Object> before = new LinkedHashMap<>(); // signal to its handler
+
+    private Interrupts() {}
 
     /** Listens until {@link #close}. */
     public static Interrupts throwing(StopSwitch stop) {
@@ -29,12 +32,16 @@ public final class Interrupts {
                     }
                     return method.invoke(stop, arguments); // equals, hashCode, toString
                 };
-        return new Interrupts(
-                handle(
-                        Proxy.newProxyInstance(
-                                Interrupts.class.getClassLoader(),
-                                new Class<?>[] {type("sun.misc.SignalHandler")},
-                                onSignal)));
+        Object handler =
+                Proxy.newProxyInstance(
+                        Interrupts.class.getClassLoader(),
+                        new Class<?>[] {type("sun.misc.SignalHandler")},
+                        onSignal);
+        Interrupts interrupts = new Interrupts();
+        for (String signal : SIGNALS) {
+            interrupts.before.put(signal, handle(signal, handler));
+        }
+        return interrupts;
     }
 
     private static void interrupted(StopSwitch stop) {
@@ -44,12 +51,12 @@ public final class Interrupts {
         stop.stop();
     }
 
-    /** Signal.handle(new Signal("INT"), handler). */
-    private static Object handle(Object handler) {
+    /** Signal.handle(new Signal(name), handler). */
+    private static Object handle(String name, Object handler) {
         Class<?> signal = type("sun.misc.Signal");
         try {
             return signal.getMethod("handle", signal, type("sun.misc.SignalHandler"))
-                    .invoke(null, signal.getConstructor(String.class).newInstance("INT"), handler);
+                    .invoke(null, signal.getConstructor(String.class).newInstance(name), handler);
         } catch (ReflectiveOperationException e) {
             throw new IllegalStateException("this JVM does not let a program hear Ctrl-C", e);
         }
@@ -63,8 +70,8 @@ public final class Interrupts {
         }
     }
 
-    /** Gives Ctrl-C back to whom it belonged. */
+    /** Gives the signals back to whom they belonged. */
     public void close() {
-        handle(before);
+        before.forEach(Interrupts::handle);
     }
 }

@@ -11,7 +11,7 @@ import java.util.List;
 import java.util.concurrent.TimeUnit;
 import java.util.stream.Stream;
 
-/** {@link StandInProgram} in a JVM of its own, which a test may kill. */
+/** The program in a JVM of its own, which a test may kill. */
 final class ChildProgram {
     private static final long PATIENCE_SECONDS = 300;
 
@@ -23,7 +23,14 @@ final class ChildProgram {
         this.process = process;
     }
 
+    /** Starts {@link StandInProgram}. */
     static ChildProgram start(Path folder, String... arguments) throws IOException {
+        return start(StandInProgram.class, folder, arguments);
+    }
+
+    /** Starts a class with a main method; relative paths of its arguments lie in the folder. */
+    static ChildProgram start(Class<?> program, Path folder, String... arguments)
+            throws IOException {
         List<String> command = new ArrayList<>();
         command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
         command.add("-Xmx512m");
@@ -35,7 +42,7 @@ final class ChildProgram {
                 List.of(
                         "-cp",
                         classPath == null ? System.getProperty("java.class.path") : classPath,
-                        StandInProgram.class.getName()));
+                        program.getName()));
         command.addAll(List.of(arguments));
         Process process =
                 new ProcessBuilder(command)

@@ -113,8 +113,8 @@ class CommandLineTest {
         assertThat(ran.err())
                 .isEqualToIgnoringNewLines(
                         "4 cores need 1056 MiB of heap (200 MiB for each block in progress, 0 MiB"
-                                + " shared, 256 MiB to spare); the heap is 1024 MiB: use --cores 3"
-                                + " or less, or MANYSKIES_HEAP=1056m.");
+                                + " shared, 256 MiB to spare, and never less than 450 MiB); the heap"
+                                + " is 1024 MiB: use --cores 3 or less, or MANYSKIES_HEAP=1188m.");
         assertThat(Files.exists(folder.resolve("runs"))).isFalse();
     }
 

@@ -45,8 +45,8 @@ final class FolderLock implements AutoCloseable {
         if (!locked) {
             throw new RunFolderException(
                     run
-                            + ": another manyskies is at work in this folder, for it holds "
-                            + file
+                            + ": another manyskies is at work in this folder and has locked "
+                            + file.getFileName()
                             + ". Wait for its end or stop it; 'manyskies status' counts its blocks.");
         }
         return new FolderLock(channel);

@@ -2,8 +2,10 @@ package manyskies.result;
 
 import java.io.IOException;
 import java.nio.file.AccessDeniedException;
+import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.FileSystemException;
 import java.nio.file.NoSuchFileException;
+import java.nio.file.NotDirectoryException;
 import java.nio.file.Path;
 import java.util.Locale;
 
@@ -53,6 +55,9 @@ public class RunFolderException extends RuntimeException {
         if (cause instanceof NoSuchFileException) {
             return "its folder or it itself is gone";
         }
+        if (cause instanceof FileAlreadyExistsException || cause instanceof NotDirectoryException) {
+            return "a file stands where a folder should be";
+        }
         return cause instanceof FileSystemException file && file.getReason() != null
                 ? file.getReason()
                 : String.valueOf(cause.getMessage());
@@ -64,6 +69,9 @@ public class RunFolderException extends RuntimeException {
         }
         if (isReadOnly(cause) || cause instanceof AccessDeniedException) {
             return "allow writing there or choose another folder with --out";
+        }
+        if (cause instanceof FileAlreadyExistsException || cause instanceof NotDirectoryException) {
+            return "move it away or choose another folder with --out";
         }
         return "see to the disk";
     }

@@ -5,10 +5,11 @@ import java.security.NoSuchAlgorithmException;
 import java.util.HexFormat;
 
 /** SHA-256 as 64 hexadecimal digits. */
-final class Sha256 {
+public final class Sha256 {
     private Sha256() {}
 
-    static String of(byte[] bytes) {
+    /** The checksum of bytes. */
+    public static String of(byte[] bytes) {
         try {
             return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(bytes));
         } catch (NoSuchAlgorithmException e) {

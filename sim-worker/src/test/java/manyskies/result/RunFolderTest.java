@@ -75,9 +75,8 @@ class RunFolderTest {
                     .isInstanceOf(RunFolderException.class)
                     .hasMessage(
                             run()
-                                    + ": another manyskies is at work in this folder, for it holds "
-                                    + run().resolve(".lock")
-                                    + ". Wait for its end or stop it; 'manyskies status' counts"
+                                    + ": another manyskies is at work in this folder and has locked"
+                                    + " .lock. Wait for its end or stop it; 'manyskies status' counts"
                                     + " its blocks.");
             first.commit(TestBlocks.encoded(0));
             assertThat(RunFolder.reading(run()).committed()).hasSize(1);
