@@ -6,6 +6,7 @@ import java.util.function.IntPredicate;
 import org.hipparchus.linear.Array2DRowRealMatrix;
 import org.hipparchus.linear.ArrayRealVector;
 import org.hipparchus.linear.LUDecomposition;
+import org.hipparchus.linear.RealMatrix;
 import org.hipparchus.linear.RealVector;
 
 /**
@@ -47,28 +48,33 @@ final class CombinationWeights {
         if (alive.isEmpty()) {
             return;
         }
-        RealVector r = new ArrayRealVector(alive.size());
-        Array2DRowRealMatrix s = new Array2DRowRealMatrix(alive.size(), alive.size());
-        for (int i = 0; i < alive.size(); i++) {
-            r.setEntry(i, responses.get(alive.get(i))[mode]);
-            for (int j = 0; j < alive.size(); j++) {
-                s.setEntry(i, j, covariance.at(alive.get(i), alive.get(j), mode));
-            }
-        }
         RealVector scale = new ArrayRealVector(alive.size());
         for (int i = 0; i < alive.size(); i++) {
-            scale.setEntry(i, 1 / Math.sqrt(s.getEntry(i, i)));
+            int a = alive.get(i);
+            scale.setEntry(i, 1 / Math.sqrt(covariance.at(a, a, mode)));
         }
-        for (int i = 0; i < alive.size(); i++) { // to correlations, so that none is singular
-            r.setEntry(i, r.getEntry(i) * scale.getEntry(i));
-            for (int j = 0; j < alive.size(); j++) {
-                s.setEntry(i, j, s.getEntry(i, j) * scale.getEntry(i) * scale.getEntry(j));
-            }
+        RealVector r = new ArrayRealVector(alive.size());
+        for (int i = 0; i < alive.size(); i++) {
+            r.setEntry(i, responses.get(alive.get(i))[mode] * scale.getEntry(i));
         }
+        RealMatrix s = correlations(mode, alive, covariance, scale);
         RealVector solved = new LUDecomposition(s).getSolver().solve(r);
         double norm = solved.dotProduct(r);
         for (int i = 0; i < alive.size(); i++) {
             out.get(alive.get(i))[mode] = solved.getEntry(i) * scale.getEntry(i) / norm;
         }
+    }
+
+    /** S with a unit diagonal, so that no small pivot is a matter of units. */
+    private static RealMatrix correlations(
+            int mode, List<Integer> alive, Covariance covariance, RealVector scale) {
+        RealMatrix s = new Array2DRowRealMatrix(alive.size(), alive.size());
+        for (int i = 0; i < alive.size(); i++) {
+            for (int j = 0; j < alive.size(); j++) {
+                double c = covariance.at(alive.get(i), alive.get(j), mode);
+                s.setEntry(i, j, c * scale.getEntry(i) * scale.getEntry(j));
+            }
+        }
+        return s;
     }
 }

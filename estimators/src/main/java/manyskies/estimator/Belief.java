@@ -25,8 +25,10 @@ public final class Belief {
     private final SlopedFields sloped;
     private final EnumMap<SkyField, LegField> filtered = new EnumMap<>(SkyField.class);
     private final EnumMap<SkyField, LegField> jointlyFiltered = new EnumMap<>(SkyField.class);
-    private final Map<String, LegField> weighted = new HashMap<>();
+    private final Map<Weighted, LegField> weighted = new HashMap<>();
     private final Map<Class<?>, Object> shared = new HashMap<>();
+
+    private record Weighted(SkyField field, Spectrum spectrum) {}
 
     /**
      * A belief.
@@ -93,9 +95,19 @@ public final class Belief {
 
     /**
      * The same belief, working with another transform of the same space: for another thread. The
-     * leg fields are shared, so that estimators made for one serve the other.
+     * leg fields are shared, so that estimators made for one serve the other; what {@link #shared}
+     * has made is not, since it may hold the transform.
+     *
+     * @throws IllegalArgumentException if the transform is one of another space
      */
     public Belief on(SkyTransform other) {
+        if (!other.space().equals(transform.space())) {
+            throw new IllegalArgumentException(
+                    "a belief about modes of "
+                            + transform.space()
+                            + " cannot work with a transform of "
+                            + other.space());
+        }
         return new Belief(this, other);
     }
 
@@ -107,7 +119,7 @@ public final class Belief {
     /** C^XY X_bar: a field filtered on its own, times a weight spectrum. */
     public LegField weighted(SkyField x, Spectrum spectrum) {
         return weighted.computeIfAbsent(
-                x + " " + spectrum, key -> filtered(x).times(weights.of(spectrum)));
+                new Weighted(x, spectrum), key -> filtered(x).times(weights.of(spectrum)));
     }
 
     /** X_bar: a field of the joint filter. */

@@ -17,6 +17,10 @@ public interface EstimatorFactory {
     /** The fields it reads. */
     Set<SkyField> needs();
 
-    /** Builds the estimator. */
+    /**
+     * Builds the estimator.
+     *
+     * @param belief what the analysis believes; its transform may be used here, but not kept
+     */
     Estimator prepare(Belief belief);
 }

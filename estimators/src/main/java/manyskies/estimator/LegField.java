@@ -69,7 +69,7 @@ public final class LegField {
         return out;
     }
 
-    /** The coefficient of a field per mode, or null if it is zero throughout. */
+    /** The coefficient of a field per mode, read only, or null if it is zero throughout. */
     public double[] coefficient(SkyField field) {
         return coefficients.get(field);
     }

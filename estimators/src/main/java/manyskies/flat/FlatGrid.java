@@ -115,7 +115,12 @@ public record FlatGrid(int nx, int ny, double pixel) implements ModeSpace {
         return Math.PI / pixel;
     }
 
-    /** The patch of the same sides, hence the same modes, with another number of pixels. */
+    /**
+     * The patch of the same sides, hence the same modes, with another number of pixels. Sides, and
+     * so multipoles, agree to rounding only.
+     *
+     * @throws IllegalArgumentException if pixels would not be square, or as the constructor
+     */
     public FlatGrid withPixels(int otherNx, int otherNy) {
         if ((long) otherNx * ny != (long) otherNy * nx) {
             throw new IllegalArgumentException(

@@ -24,8 +24,8 @@ import manyskies.spectrum.ModeSpectra;
  *                                               + w_b(l2,l1) C1^{xa yb} C2^{ya xb}]
  * </pre>
  *
- * <p>and N0^ab = N^ab / (R^a R^b). Hu and Okamoto 2002 (astro-ph/0111606). Units: R in uK^0 sr^0
- * for inverse-variance weights; N0 that of C_L^phiphi. One thread at a time.
+ * <p>and N0^ab = N^ab / (R^a R^b). Hu and Okamoto 2002 (astro-ph/0111606). Units: for legs filtered
+ * by inverse variances R and N are of 1 / sr; N0 is of C_L^phiphi, sr. One thread at a time.
  */
 public final class AnalyticResponse {
     private final SkyTransform transform;

@@ -18,8 +18,8 @@ import manyskies.field.SpinMap;
  *   (Lxl)(Lxl') = |L|^2 [Re(l l'^*) - Re(exp(-2 i phi_L) l l')] / 2
  * </pre>
  *
- * <p>F and G depend on l and -l alike, so that all maps are even or odd and the modes real. Takes
- * memory of three maps; one thread at a time.
+ * <p>F and G depend on l and -l alike, so that all maps are even or odd and the modes real. Keeps
+ * three maps, and some twelve more while a product is added; one thread at a time.
  */
 final class Convolution {
     private static final int HIGHEST_HARMONIC = 4;

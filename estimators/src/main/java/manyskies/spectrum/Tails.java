@@ -7,9 +7,10 @@ import java.util.Arrays;
  *
  * <p>T and E: exponential decay in l (the damping tail); potential: a power law in L. The rate of
  * decay is that between the means of the last two stretches of {@value #STRETCH} multipoles (about
- * one acoustic period; shorter for short tables), the slope that over the last one; neither rises. TE is continued by zero: it is
- * oscillating and by then negligible beside lensed TE. Results within a few hundred multipoles of
- * the end of the table rest on this; far below it does not matter.
+ * one acoustic period; shorter for short tables), the slope that over the last one; neither rises.
+ * TE is continued by zero: it is oscillating and by then negligible beside lensed TE. Results
+ * within a few hundred multipoles of the end of the table rest on this; far below it does not
+ * matter.
  */
 final class Tails {
     private static final int STRETCH = 300;

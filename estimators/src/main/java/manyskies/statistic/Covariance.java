@@ -1,5 +1,7 @@
 package manyskies.statistic;
 
+import java.util.Arrays;
+
 /**
  * The covariance matrix of a vector over realisations, as estimated from n of them.
  *
@@ -45,7 +47,7 @@ public final class Covariance {
                                 + matrix[i].length
                                 + " columns");
             }
-            lower[i] = java.util.Arrays.copyOf(matrix[i], i + 1);
+            lower[i] = Arrays.copyOf(matrix[i], i + 1);
         }
         return new Covariance(lower, count);
     }

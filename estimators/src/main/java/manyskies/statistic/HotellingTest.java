@@ -1,5 +1,6 @@
 package manyskies.statistic;
 
+import java.util.Arrays;
 import org.hipparchus.exception.MathIllegalArgumentException;
 import org.hipparchus.linear.Array2DRowRealMatrix;
 import org.hipparchus.linear.ArrayRealVector;
@@ -37,7 +38,7 @@ public record HotellingTest(
      */
     public static HotellingTest of(MeanVector mean, double expected) {
         double[] all = new double[mean.size()];
-        java.util.Arrays.fill(all, expected);
+        Arrays.fill(all, expected);
         return of(mean, all);
     }
 

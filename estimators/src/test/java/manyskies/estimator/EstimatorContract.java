@@ -10,6 +10,7 @@ import manyskies.field.CmbModes;
 import manyskies.field.Modes;
 import manyskies.field.SkyField;
 import manyskies.flat.FlatGrid;
+import manyskies.flat.FlatTransform;
 import manyskies.quadratic.SmallSky;
 import manyskies.response.AnalyticResponse;
 import manyskies.response.LensAndCurl;
@@ -122,6 +123,19 @@ public abstract class EstimatorContract {
         assertSameBits(factory.prepare(belief).reconstruct(pair(belief, 8, 9)), first);
         Belief fresh = SmallSky.belief();
         assertSameBits(factory.prepare(fresh).reconstruct(pair(fresh, 8, 9)), first);
+    }
+
+    /** Threads share an estimator and bring transforms of their own; it must use those. */
+    @Test
+    final void itUsesTheTransformOfItsLegsAlone() {
+        FlatTransform first = FlatTransform.of(RECTANGLE, 2 * SmallSky.LMAX);
+        Belief belief = SmallSky.belief().on(first);
+        Belief other = belief.on(FlatTransform.of(RECTANGLE, 2 * SmallSky.LMAX));
+        Estimator estimator = factory.prepare(belief);
+        Reconstruction expected = estimator.reconstruct(pair(belief, 21, 22));
+        long before = first.transforms();
+        assertSameBits(estimator.reconstruct(pair(other, 21, 22)), expected);
+        assertThat(first.transforms()).isEqualTo(before);
     }
 
     /** Maps are shared; who comes first must not matter, and nobody writes to them. */

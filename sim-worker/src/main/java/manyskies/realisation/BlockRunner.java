@@ -44,8 +44,8 @@ public final class BlockRunner {
     /**
      * The finished block.
      *
-     * @throws IllegalArgumentException if the set is unknown
-     * @throws RealisationException if a realisation fails; it names the index
+     * @throws RealisationException if a realisation fails, or the set is unknown; it names set and
+     *     index
      */
     public Block run(BlockId id) {
         Measurements measured = new Measurements();

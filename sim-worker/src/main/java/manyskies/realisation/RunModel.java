@@ -42,6 +42,7 @@ public final class RunModel {
     private final Specification specification;
     private final FlatGrid mapGrid;
     private final FlatGrid productGrid;
+    private final double lout; // largest L that is reconstructed
     private final Belief belief;
     private final double[] deconvolution; // 1 / B_l on the product grid
     private final List<Estimator> estimators = new ArrayList<>();
@@ -57,11 +58,12 @@ public final class RunModel {
         Patch patch = specification.patch();
         Analysis analysis = specification.analysis();
         mapGrid = new FlatGrid(patch.nx(), patch.ny(), patch.pixel());
-        double lout = analysis.bands().upper(analysis.bands().count() - 1);
+        lout = analysis.bands().upper(analysis.bands().count() - 1);
         productGrid = ProductGrid.of(mapGrid, lmax(), lout);
-        belief = belief(lout);
+        Belief preparing = assumed();
+        belief = preparing.on(preparing.transform()); // without the integrals of the preparation
         deconvolution = deconvolution(specification.survey());
-        reconstructed = ModeSubset.of(productGrid, belief::reconstructs);
+        reconstructed = ModeSubset.of(productGrid, preparing::reconstructs);
         bandpowers = Bandpowers.of(reconstructed, analysis.bands());
         Optional<EdgeTaper> taper =
                 specification.survey().edgeTaper() == 0
@@ -69,7 +71,7 @@ public final class RunModel {
                         : Optional.of(EdgeTaper.of(mapGrid, specification.survey().edgeTaper()));
         meanMask2 = taper.map(t -> t.meanPower(2)).orElse(1.0);
         meanMask4 = taper.map(t -> t.meanPower(4)).orElse(1.0);
-        analysis.estimators().forEach(this::prepare);
+        analysis.estimators().forEach(name -> prepare(name, preparing));
     }
 
     /**
@@ -81,7 +83,7 @@ public final class RunModel {
         return new RunModel(specification);
     }
 
-    private Belief belief(double lout) {
+    private Belief assumed() {
         Analysis analysis = specification.analysis();
         Spectra unlensed = specification.unlensed();
         Spectra lensed = LensedSpectra.of(unlensed);
@@ -126,8 +128,8 @@ public final class RunModel {
         return inverse;
     }
 
-    private void prepare(String name) {
-        Estimator estimator = Estimators.named(name).prepare(belief);
+    private void prepare(String name, Belief preparing) {
+        Estimator estimator = Estimators.named(name).prepare(preparing);
         BilinearWeight weight =
                 estimator
                         .weight()
@@ -138,9 +140,9 @@ public final class RunModel {
                                                         + name
                                                         + "' declares no weight; its response"
                                                         + " cannot be computed"));
-        AnalyticResponse response = AnalyticResponse.of(belief);
-        LensAndCurl r = response.response(weight, belief.weights());
-        LensAndCurl n = response.noise(weight, weight, belief.total());
+        AnalyticResponse response = AnalyticResponse.of(preparing);
+        LensAndCurl r = response.response(weight, preparing.weights());
+        LensAndCurl n = response.noise(weight, weight, preparing.total());
         estimators.add(estimator);
         Normalisation made = Normalisation.of(r, reconstructed);
         normalisation.put(name, made);
@@ -151,11 +153,6 @@ public final class RunModel {
 
     /** A transform of the product grid for one thread. */
     FlatTransform transform() {
-        double lout =
-                specification
-                        .analysis()
-                        .bands()
-                        .upper(specification.analysis().bands().count() - 1);
         return FlatTransform.of(productGrid, Math.max(lmax(), lout));
     }
 
