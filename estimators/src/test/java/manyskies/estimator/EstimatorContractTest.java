@@ -12,6 +12,7 @@ import java.util.function.Consumer;
 import java.util.function.UnaryOperator;
 import manyskies.field.Modes;
 import manyskies.field.SkyField;
+import manyskies.field.SkyTransform;
 import manyskies.quadratic.QuadraticFactory;
 import org.junit.jupiter.api.Test;
 
@@ -152,6 +153,19 @@ class EstimatorContractTest {
                     return plus(r, r.gradient(), 1e-12 * calls[0]++);
                 },
                 EstimatorContract::theSameLegsGiveTheSameBits);
+    }
+
+    /** One that works with the first transform it ever saw, which is another thread's by then. */
+    @Test
+    void aTransformKeptIsSeen() {
+        SkyTransform[] first = new SkyTransform[1];
+        assertSeen(
+                (right, legs) -> {
+                    first[0] = first[0] == null ? legs.transform() : first[0];
+                    first[0].synthesise(0, legs.a().legs().temperature(), null);
+                    return right.reconstruct(legs);
+                },
+                EstimatorContract::itUsesTheTransformOfItsLegsAlone);
     }
 
     /** One that spoils a map which it shares with others. */

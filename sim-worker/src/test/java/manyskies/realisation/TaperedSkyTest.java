@@ -22,7 +22,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 class TaperedSkyTest {
     private static final int SKIES = 16;
 
-    /** Of the expected value; the faults below are five times as large. */
+    /** Of the expected value; the faults below are several times as large. */
     private static final double ALLOWED = 0.07;
 
     /** In errors measured from these 16 skies: P(|t| > 7.1) = 4e-6 with 15 degrees, three tests. */
@@ -54,10 +54,13 @@ class TaperedSkyTest {
         assertThat(isNearOne(transfer(name), model.meanMask2())).isFalse();
     }
 
-    /** Statistical: pairs of independent skies, over mean(W^4), have the analytic noise. */
+    /**
+     * Statistical: pairs of independent skies, over mean(W^4), have the analytic noise. Not so eb:
+     * the B that these wide edges make of E is in its legs but not in its believed totals, and its
+     * noise is 24 +- 1.5 per cent above the analytic one (measured with this test's skies).
+     */
     @Test
     void theMonteCarloNoiseOfTemperatureIsNearTheAnalyticOne() {
-        System.out.println("EBN0 " + noise("eb") + " TTN0 " + noise("tt") + transfer("tt") + transfer("eb"));
         assertThat(isNearOne(noise("tt"), 1)).isTrue();
     }
 
