@@ -14,7 +14,6 @@ import java.util.Optional;
 final class Pace {
     private final int total;
     private final int warmUp;
-    private final Instant start;
     private Instant warm;
     private Instant last;
     private int doneWhenWarm;
@@ -30,7 +29,6 @@ final class Pace {
     Pace(int total, int warmUp, Instant start) {
         this.total = total;
         this.warmUp = warmUp;
-        this.start = start;
         this.warm = start;
         this.last = start;
     }
@@ -53,12 +51,9 @@ final class Pace {
         return total;
     }
 
-    /** Realisations a second; before the warm-up is over the rate since the start. */
+    /** Realisations a second since the warm-up; nothing before, when it would be far too low. */
     Optional<Double> rate() {
-        if (done > doneWhenWarm) {
-            return perSecond(done - doneWhenWarm, Duration.between(warm, last));
-        }
-        return perSecond(done, Duration.between(start, last));
+        return perSecond(done - doneWhenWarm, Duration.between(warm, last));
     }
 
     private static Optional<Double> perSecond(int realisations, Duration time) {

@@ -41,17 +41,31 @@ class ProgressLineTest {
     @Test
     void slowWorkIsCountedByTheMinute() {
         ProgressLine line = line(true, 40);
+        line.blockDone(block(0));
+        line.blockDone(block(1));
+        clock.forward(60);
+        line.blockDone(block(2));
+        assertThat(text.toString()).contains("4.0 a minute, ends about 12:08:00");
+    }
+
+    /** The first block of several in progress says nothing yet about the rate of all. */
+    @Test
+    void beforeTheWarmUpNoRateIsClaimed() {
+        ProgressLine line = line(true, 40);
         clock.forward(60);
         line.blockDone(block(0));
-        assertThat(text.toString()).contains("4.0 a minute, ends about 12:10:00");
+        line.blockDone(block(1));
+        assertThat(text.toString()).endsWith("\r\u001b[K8 of 40 realisations");
     }
 
     @Test
     void anEndOnAnotherDayHasItsDate() {
         ProgressLine line = line(true, 4000);
-        clock.forward(60);
         line.blockDone(block(0));
-        assertThat(text.toString()).contains("ends about 2026-03-02 04:40");
+        line.blockDone(block(1));
+        clock.forward(60);
+        line.blockDone(block(2));
+        assertThat(text.toString()).contains("ends about 2026-03-02 04:38");
     }
 
     @Test

@@ -153,13 +153,20 @@ public final class SpecificationReader {
             top.fault("spectra", "'" + name + "'", "that is no path: " + e.getReason());
         } catch (FileText.Unreadable e) {
             top.faults()
-                    .add(top.line("spectra"), "the spectra file " + name + " " + e.getMessage());
+                    .add(top.line("spectra"), "the spectra file " + sought(name) + e.getMessage());
         } catch (SpectraException e) {
             addAll(top.line("spectra"), name, e.faults());
         } catch (IOException e) {
             throw new IllegalStateException("a text in memory could not be read", e);
         }
         return Optional.empty();
+    }
+
+    /** The name as it was given and, of a relative one, from where it leads. */
+    private String sought(String name) {
+        return Path.of(name).isAbsolute()
+                ? name + " "
+                : name + " (relative to " + file.getFileName() + ") ";
     }
 
     private void addAll(int line, String table, List<String> found) {

@@ -26,8 +26,9 @@ class SpectraFaultsTest {
     @CsvSource(
             delimiter = '|',
             value = {
-                "none.txt | the spectra file none.txt does not exist; check the path.",
-                ". | the spectra file . is a directory; name a file in it.",
+                "none.txt | the spectra file none.txt (relative to sky.yaml) does not exist; check the path.",
+                ". | the spectra file . (relative to sky.yaml) is a directory; name a file in it.",
+                "/none/none.txt | the spectra file /none/none.txt does not exist; check the path.",
                 "[a.txt] | spectra is a list; it must be the path of a table.",
             })
     void aFileThatGivesNoTextIsOneFault(String path, String sentence) {
