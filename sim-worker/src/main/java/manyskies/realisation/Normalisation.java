@@ -16,16 +16,35 @@ final class Normalisation {
         this.inverseCurl = inverseCurl;
     }
 
-    /** The inverse of a response; where that is not positive, zero. */
-    static Normalisation of(LensAndCurl response, ModeSubset kept) {
+    /**
+     * The inverse of a response.
+     *
+     * @throws IllegalArgumentException if the response of a kept mode is not positive
+     */
+    static Normalisation of(String estimator, LensAndCurl response, ModeSubset kept) {
         return new Normalisation(
-                kept, inverse(kept.pack(response.lens())), inverse(kept.pack(response.curl())));
+                kept,
+                inverse(estimator, kept, response.lens()),
+                inverse(estimator, kept, response.curl()));
     }
 
-    private static double[] inverse(double[] response) {
+    private static double[] inverse(String estimator, ModeSubset kept, double[] ofMode) {
+        double[] response = kept.pack(ofMode);
         double[] out = new double[response.length];
         for (int mode = 0; mode < out.length; mode++) {
-            out[mode] = response[mode] > 0 ? 1 / response[mode] : 0;
+            if (!(response[mode] > 0)) {
+                throw new IllegalArgumentException(
+                        "the response of estimator '"
+                                + estimator
+                                + "' is "
+                                + response[mode]
+                                + " at L = "
+                                + kept.multipole(mode)
+                                + "; it must be positive wherever bands reach: end the bands"
+                                + " lower, widen the multipoles of the filter, or correct the"
+                                + " estimator's weight");
+            }
+            out[mode] = 1 / response[mode];
         }
         return out;
     }

@@ -144,7 +144,7 @@ public final class RunModel {
         LensAndCurl r = response.response(weight, preparing.weights());
         LensAndCurl n = response.noise(weight, weight, preparing.total());
         estimators.add(estimator);
-        Normalisation made = Normalisation.of(r, reconstructed);
+        Normalisation made = Normalisation.of(name, r, reconstructed);
         normalisation.put(name, made);
         analytic.put(name + ".response", bandpowers.mean(reconstructed.pack(r.lens())));
         analytic.put(name + ".n0_analytic", bandpowers.mean(made.lensNoise(n)));

@@ -37,9 +37,19 @@ public final class Block {
     public static Block of(
             BlockId id, Map<String, List<double[]>> columns, Map<String, double[]> fieldSums) {
         columns.forEach((name, rows) -> check(id, name, rows));
+        fieldSums.forEach((name, sum) -> checkSum(id, name, sum));
         SortedMap<String, List<double[]>> sorted = new TreeMap<>();
         columns.forEach((name, rows) -> sorted.put(name, List.copyOf(rows)));
         return new Block(id, sorted, new TreeMap<>(fieldSums));
+    }
+
+    private static void checkSum(BlockId id, String name, double[] sum) {
+        for (double value : sum) {
+            if (!Double.isFinite(value)) {
+                throw new IllegalArgumentException(
+                        id.stem() + ": the field sum of " + name + " holds " + value);
+            }
+        }
     }
 
     private static void check(BlockId id, String name, List<double[]> rows) {
