@@ -28,7 +28,7 @@ class RemapErrorTest {
         return Arrays.stream(errors).map(Math::abs).max().orElseThrow();
     }
 
-    /** The claim of the default degree: 0.1 per cent of the power of T and E, 0.3 of B. */
+    /** The claim of degree 3: 0.1 per cent of the power of T and E, 0.3 of B. */
     @Test
     void degreeThreeIsGoodToAThousandthOfThePower() {
         CmbModes found = error.remapped(3, false);
