@@ -29,7 +29,8 @@ final class SkyCommand implements Callable<Integer> {
             names = "--index",
             required = true,
             paramLabel = "N",
-            description = "index of the realisation in set 'data', from 0; it need not be one of the run's")
+            description =
+                    "index of the realisation in set 'data', from 0; it need not be one of the run's")
     private int index;
 
     @Option(

@@ -82,9 +82,26 @@ final class ChildProgram {
         exitCode();
     }
 
-    /** Ctrl-C. */
+    /**
+     * Ctrl-C; where whoever started the tests has them ignore it (a shell's background job does), a
+     * program started by them never hears it, and the polite request to terminate stands for it.
+     */
     void interrupt() throws IOException, InterruptedException {
-        new ProcessBuilder("kill", "-INT", Long.toString(process.pid())).start().waitFor();
+        String signal = interruptIsIgnored(process.pid()) ? "-TERM" : "-INT";
+        new ProcessBuilder("kill", signal, Long.toString(process.pid())).start().waitFor();
+    }
+
+    /** Whether the second lowest bit, that of SIGINT, is set in the mask of ignored signals. */
+    private static boolean interruptIsIgnored(long pid) throws IOException {
+        Path status = Path.of("/proc", Long.toString(pid), "status");
+        if (!Files.exists(status)) { // no such file but on Linux
+            return false;
+        }
+        try (Stream<String> lines = Files.lines(status)) {
+            return lines.filter(line -> line.startsWith("SigIgn:"))
+                    .map(line -> line.substring("SigIgn:".length()).strip())
+                    .anyMatch(mask -> (Long.parseUnsignedLong(mask, 16) & 2) != 0);
+        }
     }
 
     int exitCode() throws InterruptedException {
